@@ -1,0 +1,16 @@
+export { Catalogue } from './catalogue';
+export { CatalogueChunk } from './catalogue-chunk';
+export { Curve } from './curve';
+export { Grain } from './grain';
+export { Material } from './material';
+export { MaterialVersion } from './material-version';
+export { Membership } from './membership';
+export { Person } from './person';
+export { PersonalToken } from './personal-token';
+export { Reject } from './reject';
+export { ResearchGroup } from './research-group';
+export { Run } from './run';
+export { RunGrain } from './run-grain';
+export { Session } from './session';
+export { Star } from './star';
+export { StarVersion } from './star-version';

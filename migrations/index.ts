@@ -1,0 +1,3 @@
+import type { MigrationObject } from '@mikro-orm/core';
+
+export const migrations: MigrationObject[] = [];

@@ -1,0 +1,44 @@
+import type { GroupRole } from '@/entities/membership';
+import { Refusal } from '@/src/errors';
+import type { Actor } from './actor';
+
+type Role = GroupRole | 'admin';
+
+/** Who may do what: the one table. A role that is not named may not. */
+export const permissions = {
+  'catalogue.read': { does: 'See the catalogues of the group', roles: ['pi', 'researcher', 'student'], scope: 'read' },
+  'catalogue.upload': { does: 'Upload a catalogue', roles: ['pi', 'researcher'], scope: 'write' },
+  'run.read': { does: 'See the runs of the group', roles: ['pi', 'researcher', 'student'], scope: 'read' },
+  'run.request': { does: 'Request a run', roles: ['pi', 'researcher', 'student'], scope: 'write' },
+  'run.cancel': { does: 'Cancel a run', roles: ['pi', 'researcher', 'student'], scope: 'write' },
+  'star.read': { does: 'See star presets', roles: ['pi', 'researcher', 'student', 'admin'], scope: 'read' },
+  'material.read': { does: 'See materials', roles: ['pi', 'researcher', 'student', 'admin'], scope: 'read' },
+  'curve.compute': { does: 'Use the calculator', roles: ['pi', 'researcher', 'student', 'admin'], scope: 'read' },
+  'token.manage': { does: 'Make and revoke own access tokens', roles: ['pi', 'researcher', 'student', 'admin'], scope: 'write' },
+} as const satisfies Record<string, { does: string; roles: readonly Role[]; scope: 'read' | 'write' }>;
+
+export type Permission = keyof typeof permissions;
+
+export function may(actor: Actor, permission: Permission): boolean {
+  const rule = permissions[permission];
+  if (!(actor.scopes as readonly string[]).includes(rule.scope)) return false;
+  const roles: readonly Role[] = rule.roles;
+  if (actor.platformRole === 'admin' && roles.includes('admin')) return true;
+  return actor.groupId !== null && actor.role !== null && roles.includes(actor.role);
+}
+
+export function demand(actor: Actor, permission: Permission): void {
+  if (!may(actor, permission)) {
+    throw new Refusal('forbidden', `Your role does not allow this: ${permissions[permission].does.toLowerCase()}.`);
+  }
+}
+
+/** The filter that every query for a group's things carries. Without a group it matches nothing. */
+export function ofOwnGroup(actor: Actor): { group: string } {
+  return { group: actor.groupId ?? '00000000-0000-0000-0000-000000000000' };
+}
+
+/** Presets are everybody's, or the own group's. */
+export function visiblePresets(actor: Actor): { $or: ({ group: null } | { group: string })[] } {
+  return { $or: [{ group: null }, ofOwnGroup(actor)] };
+}
