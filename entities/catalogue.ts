@@ -1,5 +1,5 @@
 import { defineEntity, p, type InferEntity } from '@mikro-orm/core';
-import { createdAt, id, moment } from './columns';
+import { createdAt, id, moment, real } from './columns';
 import { Person } from './person';
 import { ResearchGroup } from './research-group';
 
@@ -22,7 +22,7 @@ export const Catalogue = defineEntity({
     uploadedBy: () => p.manyToOne(Person),
     name: p.string().length(200),
     fileName: p.string().length(255),
-    byteSize: p.double(),
+    byteSize: real(),
     sha256: p.string().length(64),
     mapping: p.json().$type<CatalogueMapping | null>().nullable(),
     defaults: p.json().$type<CatalogueDefaults>(),

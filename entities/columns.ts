@@ -9,4 +9,4 @@ export const createdAt = () => p.datetime().onCreate(() => new Date()).defaultRa
 export const moment = () => p.datetime();
 
 /** A number in PostgreSQL's float8: numeric would come back as a string. */
-export const real = () => p.double();
+export const real = () => p.float().columnType('double precision');

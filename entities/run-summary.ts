@@ -31,3 +31,12 @@ export type RunSummary = {
   perMaterial: MaterialSummary[];
   warnings: string[];
 };
+
+/** The size distribution split by fate; edges are common to the three weightings, one more than there are bins. */
+export type RunHistograms = {
+  edgesUm: number[];
+  number: FateBins;
+  area: FateBins;
+  mass: FateBins;
+};
+export type FateBins = { unbound: number[]; bound: number[] };

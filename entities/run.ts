@@ -4,7 +4,7 @@ import { createdAt, id, moment, real } from './columns';
 import { Person } from './person';
 import { ResearchGroup } from './research-group';
 import type { RunInputs } from './run-inputs';
-import type { RunSummary } from './run-summary';
+import type { RunHistograms, RunSummary } from './run-summary';
 
 export const runStatuses = ['queued', 'running', 'done', 'failed', 'cancelled'] as const;
 export type RunStatus = (typeof runStatuses)[number];
@@ -25,6 +25,7 @@ export const Run = defineEntity({
     inputs: p.json().$type<RunInputs>(),
     engineVersion: p.string().length(20),
     summary: p.json().$type<RunSummary | null>().nullable(),
+    histograms: p.json().$type<RunHistograms | null>().nullable(),
     resultSha256: p.string().length(64).nullable(),
     claim: p.uuid().nullable(),
     attempts: p.integer().default(0),

@@ -38,7 +38,7 @@ export function ofOwnGroup(actor: Actor): { group: string } {
   return { group: actor.groupId ?? '00000000-0000-0000-0000-000000000000' };
 }
 
-/** Presets are everybody's, or the own group's. */
-export function visiblePresets(actor: Actor): { $or: ({ group: null } | { group: string })[] } {
-  return { $or: [{ group: null }, ofOwnGroup(actor)] };
+/** Presets are everybody's, or the group's own. */
+export function visiblePresets(groupId: string | null): { $or: ({ group: null } | { group: string })[] } {
+  return { $or: groupId === null ? [{ group: null }] : [{ group: null }, { group: groupId }] };
 }

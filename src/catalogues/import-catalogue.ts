@@ -1,13 +1,14 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import { Catalogue } from '@/entities';
-import { openCopy } from '@/src/copy/copy-stream';
-import { uuidBytes } from '@/src/copy/binary-rows';
+import { ClaimLost } from '@/src/claim';
+import { copyInto } from '@/src/copy/copy-stream';
+import { uuidBytes, type BinaryRows } from '@/src/copy/binary-rows';
 import { knownMaterials } from '@/src/materials/known-materials';
 import { CatalogueFault, readCatalogue, type GrainRow, type RejectRow } from './read-catalogue';
 import { originalBytes } from './original-bytes';
 
 export type ImportLimits = { maxRows: number };
-export type ImportProgress = { claim: string; onRows(rows: number): void };
+export type ImportProgress = { claim: string; signal: AbortSignal; onRows(rows: number): void };
 
 const keptRejects = 100_000;
 const grainColumns = ['catalogue_id', 'ordinal', 'line', 'label', 'radius_m', 'radius_sigma_m', 'density_kg_m3', 'density_sigma_kg_m3', 'material', 'count'];
@@ -24,7 +25,7 @@ export async function importCatalogue(em: EntityManager, id: string, limits: Imp
   await em.transactional(async (tx) => {
     const outcome = await tx
       .transactional(async (inner) => {
-        const reading = await copyGrains(inner, catalogue, { ...materials, ...limits }, rejects, progress);
+        const reading = await copyGrains(inner, em, catalogue, { ...materials, ...limits }, rejects, progress);
         if (reading.rejected > 0 && catalogue.onInvalidRows === 'refuse') throw new Refused(reading);
         return { reading, failure: reading.accepted === 0 ? 'No row could be accepted.' : null };
       })
@@ -52,9 +53,6 @@ export async function importCatalogue(em: EntityManager, id: string, limits: Imp
   });
 }
 
-/** Another worker took the work over: what this one did is rolled back. */
-export class ClaimLost extends Error {}
-
 type Reading = Awaited<ReturnType<typeof copyGrains>>;
 
 class Refused extends Error {
@@ -76,35 +74,36 @@ function failureOf(error: unknown): { reading: Reading | null; failure: string }
 
 async function copyGrains(
   tx: EntityManager,
+  em: EntityManager,
   catalogue: Catalogue,
   options: Omit<Parameters<typeof readCatalogue>[1], 'mapping' | 'defaults'>,
   rejects: RejectRow[],
   progress: ImportProgress,
 ) {
-  const copy = await openCopy(tx, 'grain', grainColumns);
   const id = uuidBytes(catalogue.id);
   const byMaterial = new Map<string, number>();
-  let ordinal = 0;
-  const grain = (row: GrainRow): void | Promise<void> => {
-    if (rejects.length > 0 && catalogue.onInvalidRows === 'refuse') return;
-    writeGrain(copy.rows, id, ordinal++, row);
-    byMaterial.set(row.material, (byMaterial.get(row.material) ?? 0) + 1);
-    if (!copy.rows.isFull) return;
-    progress.onRows(ordinal);
-    return copy.drain();
-  };
-  const reject = (row: RejectRow) => {
-    if (rejects.length <= keptRejects) rejects.push(row);
-  };
   const mapping = (catalogue.mapping ?? undefined) as Parameters<typeof readCatalogue>[1]['mapping'];
-  const bytes = originalBytes(tx, catalogue.id);
-  const reading = await readCatalogue(bytes, { ...options, mapping, defaults: catalogue.defaults }, { grain, reject });
-  await copy.finish();
+  const reading = await copyInto(tx, 'grain', grainColumns, ({ rows, drain }) => {
+    let ordinal = 0;
+    const grain = (row: GrainRow): void | Promise<void> => {
+      if (rejects.length > 0 && catalogue.onInvalidRows === 'refuse') return;
+      writeGrain(rows, id, ordinal++, row);
+      byMaterial.set(row.material, (byMaterial.get(row.material) ?? 0) + 1);
+      if (!rows.isFull) return;
+      progress.onRows(ordinal);
+      progress.signal.throwIfAborted();
+      return drain();
+    };
+    const reject = (row: RejectRow) => {
+      if (rejects.length <= keptRejects) rejects.push(row);
+    };
+    return readCatalogue(originalBytes(em, catalogue.id), { ...options, mapping, defaults: catalogue.defaults }, { grain, reject });
+  });
   const materials = [...byMaterial].map(([material, grains]) => ({ material, grains })).sort((a, b) => b.grains - a.grains);
   return { ...reading, materials };
 }
 
-function writeGrain(rows: Awaited<ReturnType<typeof openCopy>>['rows'], id: Buffer, ordinal: number, grain: GrainRow): void {
+function writeGrain(rows: BinaryRows, id: Buffer, ordinal: number, grain: GrainRow): void {
   rows.row(grainColumns.length);
   rows.uuid(id);
   rows.int4(ordinal);
@@ -118,19 +117,19 @@ function writeGrain(rows: Awaited<ReturnType<typeof openCopy>>['rows'], id: Buff
   rows.float8(grain.count);
 }
 
-async function copyRejects(tx: EntityManager, catalogueId: string, rejects: RejectRow[]): Promise<void> {
-  const copy = await openCopy(tx, 'reject', rejectColumns);
+function copyRejects(tx: EntityManager, catalogueId: string, rejects: RejectRow[]): Promise<void> {
   const id = uuidBytes(catalogueId);
-  for (const [ordinal, reject] of rejects.entries()) {
-    copy.rows.row(rejectColumns.length);
-    copy.rows.uuid(id);
-    copy.rows.int4(ordinal);
-    copy.rows.int4(reject.line);
-    copy.rows.text(reject.column);
-    copy.rows.text(reject.value);
-    copy.rows.text(reject.reason);
-    copy.rows.text(reject.raw);
-    if (copy.rows.isFull) await copy.drain();
-  }
-  await copy.finish();
+  return copyInto(tx, 'reject', rejectColumns, async ({ rows, drain }) => {
+    for (const [ordinal, reject] of rejects.entries()) {
+      rows.row(rejectColumns.length);
+      rows.uuid(id);
+      rows.int4(ordinal);
+      rows.int4(reject.line);
+      rows.text(reject.column);
+      rows.text(reject.value);
+      rows.text(reject.reason);
+      rows.text(reject.raw);
+      if (rows.isFull) await drain();
+    }
+  });
 }

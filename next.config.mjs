@@ -1,0 +1,33 @@
+/** For every answer; what differs per page (the content security policy) is set by proxy.ts. */
+const fixedHeaders = [
+  { key: 'X-Content-Type-Options', value: 'nosniff' },
+  { key: 'X-Frame-Options', value: 'DENY' },
+  { key: 'Referrer-Policy', value: 'same-origin' },
+  { key: 'Permissions-Policy', value: 'camera=(), microphone=(), geolocation=(), payment=(), usb=()' },
+  { key: 'Cross-Origin-Opener-Policy', value: 'same-origin' },
+  { key: 'Cross-Origin-Resource-Policy', value: 'same-origin' },
+  { key: 'Strict-Transport-Security', value: 'max-age=31536000' },
+];
+
+/** @type {import('next').NextConfig} */
+export default {
+  distDir: process.env.CHAFFLINE_NEXT_DIR ?? '.next',
+  poweredByHeader: false,
+  reactStrictMode: true,
+  async headers() {
+    return [{ source: '/:path*', headers: fixedHeaders }];
+  },
+  // Code that reads files beside itself or loads native parts must not be bundled.
+  serverExternalPackages: [
+    '@mikro-orm/core',
+    '@mikro-orm/migrations',
+    '@mikro-orm/postgresql',
+    '@node-rs/argon2',
+    'pg',
+    'pg-boss',
+    'pg-copy-streams',
+    'pino',
+    'piscina',
+    'rate-limiter-flexible',
+  ],
+};
