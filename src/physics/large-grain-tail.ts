@@ -10,7 +10,9 @@ const TAIL_STEP = 8;
 const FIT_FACTOR = 6;
 const RESIDUAL_MARGIN = 3;
 /** Powers of 1/s; the third would only follow the noise of transparent materials' means. */
-const POWERS = { opaque: [1, 4 / 3, 5 / 3], hazy: [1, 4 / 3, 5 / 3], clear: [1, 4 / 3, 5 / 3] };
+const POWERS = [1, 4 / 3, 5 / 3];
+/** Through a mantle the core shines: the surface's ray optics then misses the limit by a constant. */
+const COATED_POWERS = [0, 1, 4 / 3];
 
 interface Ray {
   weight: number;
@@ -36,7 +38,7 @@ export function largeGrainTail(
   const fitted = mieNodes.filter((node) => radiusOfIndex(node.index) >= tailStartM / FIT_FACTOR);
   const scaled = (index: number) => radiusOfIndex(index) / tailStartM;
   const limits = fitted.map((node) => rayMean(rays, radiusOfIndex(node.index)));
-  const terms = (index: number) => POWERS[clarity.kind].map((power) => scaled(index) ** -power);
+  const terms = (index: number) => (sampler.isCoated ? COATED_POWERS : POWERS).map((power) => scaled(index) ** -power);
 
   const pressure = leastSquares(
     fitted.map((node) => terms(node.index)),

@@ -1,26 +1,22 @@
-import type { RunInputs } from '@/entities/run-inputs';
 import { betaOf } from '@/src/physics/beta';
 import { lorentzRatio } from '@/src/physics/charge';
 import { discCollisionTimeYr } from '@/src/physics/collisions';
 import { prTimeYr } from '@/src/physics/drag';
 import { isUnbound, regimeOf } from '@/src/physics/fate';
-import { orbitAfterRelease } from '@/src/physics/orbit';
+import { orbitAfterRelease, semiMajorAxisFromDistance, trueAnomalyDegOf } from '@/src/physics/orbit';
 import type { GrainChunk } from './grain-chunk';
 import { emptyResults, type GrainResults } from './grain-results';
 import type { PreparedRun } from './prepare-run';
 import { regimes } from './schema';
-
-const anomalyDeg = { pericentre: 0, apocentre: 180 } as const;
-
-export const trueAnomalyDegOf = ({ at, trueAnomalyDeg }: RunInputs['release']): number =>
-  at === 'anomaly' ? (trueAnomalyDeg ?? 0) : anomalyDeg[at];
 
 /** Everything that a run says of each grain. Pure: the same inputs give the same bits. */
 export function computeGrains({ inputs, wind, materials }: PreparedRun, chunk: GrainChunk): GrainResults {
   const { star, release, disc, charging, betaCritical } = inputs;
   const { massSun, luminositySun } = star;
   const { distanceAu, eccentricity, parentBeta } = release;
-  const released = { distanceAu, eccentricity, trueAnomalyDeg: trueAnomalyDegOf(release), parentBeta: parentBeta ?? 0, massSun };
+  const trueAnomalyDeg = trueAnomalyDegOf(release);
+  const semiMajorAxisAu = semiMajorAxisFromDistance(distanceAu, eccentricity, trueAnomalyDeg);
+  const released = { semiMajorAxisAu, eccentricity, trueAnomalyDeg, parentBeta, massSun };
   const collisionTimeYr = disc ? discCollisionTimeYr({ distanceAu, massSun, opticalDepth: disc.opticalDepth }) : NaN;
   const results = emptyResults(chunk.length);
   for (let row = 0; row < chunk.length; row += 1) {
@@ -48,7 +44,7 @@ export function computeGrains({ inputs, wind, materials }: PreparedRun, chunk: G
     results.semiMajorAxisAu[row] = orbit.semiMajorAxisAu ?? NaN;
     results.eccentricity[row] = orbit.eccentricity ?? NaN;
     results.vInfKmS[row] = orbit.vInfKmS ?? NaN;
-    results.temperatureK[row] = optics.efficiencies.temperatureK(radiusM, luminositySun, distanceAu);
+    results.temperatureK[row] = optics.efficiencies.temperatureK(radiusM);
     if (charging) results.lorentzRatio[row] = lorentzRatio({ ...charging, radiusM, densityKgM3, distanceAu, massSun });
     results.regime[row] = regimes.indexOf(
       regimeOf({ isUnbound: unbound, dragTimeYr: bound ? dragYr : null, collisionTimeYr: disc ? collisionTimeYr : null }),

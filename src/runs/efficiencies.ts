@@ -1,23 +1,30 @@
 import { qprAt, type Curve } from '@/src/physics/curve';
-import { blackBodyTemperatureK, temperatureK, type Emission } from '@/src/physics/temperature';
+import { blackBodyTemperatureK, temperatureCurve, type Emission } from '@/src/physics/temperature';
 
 /** What light does to grains of one material and porosity: functions of the radius (m). */
 export type Efficiencies = {
   qpr(radiusM: number): number;
-  temperatureK(radiusM: number, luminositySun: number, distanceAu: number): number;
+  temperatureK(radiusM: number): number;
 };
 
-/** A curve and the thermal emission that belongs to it. */
-export type OpticalNode = { porosity: number; key: string; curve: Curve; emission: Emission };
+/** A curve and the temperatures that belong to it. */
+export type OpticalNode = { porosity: number; key: string; curve: Curve; temperatureK(radiusM: number): number };
 
-export const constantEfficiencies = (qpr: number): Efficiencies => ({
-  qpr: () => qpr,
-  temperatureK: (_radiusM, luminositySun, distanceAu) => blackBodyTemperatureK(luminositySun, distanceAu),
-});
+/** Where the grains are, as far as their temperature goes. */
+export type LightLevel = { luminositySun: number; distanceAu: number };
 
-export const nodeEfficiencies = ({ curve, emission }: OpticalNode): Efficiencies => ({
+export function constantEfficiencies(qpr: number, { luminositySun, distanceAu }: LightLevel): Efficiencies {
+  const blackBodyK = blackBodyTemperatureK(luminositySun, distanceAu);
+  return { qpr: () => qpr, temperatureK: () => blackBodyK };
+}
+
+export function opticalNode(porosity: number, key: string, curve: Curve, emission: Emission, { luminositySun, distanceAu }: LightLevel): OpticalNode {
+  return { porosity, key, curve, temperatureK: temperatureCurve(curve, emission, luminositySun, distanceAu) };
+}
+
+export const nodeEfficiencies = ({ curve, temperatureK }: OpticalNode): Efficiencies => ({
   qpr: (radiusM) => qprAt(curve, radiusM),
-  temperatureK: (radiusM, luminositySun, distanceAu) => temperatureK(curve, emission, radiusM, luminositySun, distanceAu),
+  temperatureK,
 });
 
 /**
@@ -32,7 +39,7 @@ export function betweenNodes(nodes: OpticalNode[], porosity: number): Efficienci
     Math.exp(parts.reduce((sum, part, index) => sum + weights[index] * Math.log(value(part)), 0));
   return {
     qpr: (radiusM) => mean((part) => part.qpr(radiusM)),
-    temperatureK: (...where) => mean((part) => part.temperatureK(...where)),
+    temperatureK: (radiusM) => mean((part) => part.temperatureK(radiusM)),
   };
 }
 

@@ -1,6 +1,6 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 
-/** What a catalogue holds of one material; means are weighted with the count. */
+/** What a catalogue holds of one material; the mean density is weighted with the mass. */
 export type MaterialPopulation = {
   material: string;
   rows: number;
@@ -14,7 +14,7 @@ type Row = { material: string; rows: number; mean: number; least: number; greate
 
 export async function materialPopulations(em: EntityManager, catalogueId: string): Promise<MaterialPopulation[]> {
   const found = await em.getConnection().execute<Row[]>(
-    `select material, count(*)::int as rows, sum(count * density_kg_m3) / sum(count) as mean,
+    `select material, count(*)::int as rows, sum(count * radius_m ^ 3 * density_kg_m3 ^ 2) / sum(count * radius_m ^ 3 * density_kg_m3) as mean,
        min(density_kg_m3) as least, max(density_kg_m3) as greatest, min(radius_m) as least_radius
      from grain where catalogue_id = ? group by material order by count(*) desc, material`,
     [catalogueId],

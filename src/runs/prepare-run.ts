@@ -4,7 +4,7 @@ import { windFactors } from '@/src/physics/drag';
 import { prepareProbability } from '@/src/physics/probability';
 import { recipeOf, spectrumOf } from './curve-ingredients';
 import { emissionInThread } from './curve-threads';
-import { betweenNodes, constantEfficiencies, nodeEfficiencies, type Efficiencies, type OpticalNode } from './efficiencies';
+import { betweenNodes, constantEfficiencies, nodeEfficiencies, opticalNode, type Efficiencies, type LightLevel, type OpticalNode } from './efficiencies';
 import { fewDensities, materialPopulations, type MaterialPopulation } from './material-population';
 import { obtainCurve } from './obtain-curve';
 import { evenPorosities, porosityOf } from './porosity-nodes';
@@ -47,7 +47,7 @@ export async function prepareRun(em: EntityManager, catalogueId: string, inputs:
     const nodes: OpticalNode[] = [];
     for (const porosity of wanted[index]) {
       report(built / total, `Optical properties of ${frozen.name}`);
-      nodes.push(await opticalNode(em, inputs, frozen, porosity, signal));
+      nodes.push(await builtNode(em, inputs, frozen, porosity, signal));
       built += 1;
     }
     materials.set(population.material, { frozen, population, nodes, at: opticsByDensity(inputs, frozen, nodes, wind) });
@@ -77,13 +77,13 @@ async function porosities(em: EntityManager, catalogueId: string, { optics, mate
   return evenPorosities(porosityOf(population.greatestDensityKgM3, compact), porosityOf(population.leastDensityKgM3, compact));
 }
 
-async function opticalNode(em: EntityManager, inputs: RunInputs, frozen: FrozenMaterial, porosity: number, signal: AbortSignal): Promise<OpticalNode> {
+async function builtNode(em: EntityManager, inputs: RunInputs, frozen: FrozenMaterial, porosity: number, signal: AbortSignal): Promise<OpticalNode> {
   const recipe = recipeOf(frozen, inputs.optics, inputs.materials, porosity);
   const [{ key, curve }, emission] = await Promise.all([
     obtainCurve(em, { recipe, spectrum: spectrumOf(inputs.star) }, signal),
     emissionInThread(recipe, signal),
   ]);
-  return { porosity, key, curve, emission };
+  return opticalNode(porosity, key, curve, emission, lightLevelOf(inputs));
 }
 
 function opticsByDensity(inputs: RunInputs, frozen: FrozenMaterial, nodes: OpticalNode[], wind: PreparedWind): (densityKgM3: number) => PreparedOptics {
@@ -102,8 +102,11 @@ function opticsByDensity(inputs: RunInputs, frozen: FrozenMaterial, nodes: Optic
   };
 }
 
-function efficienciesAt({ optics }: RunInputs, nodes: OpticalNode[], exact: OpticalNode | undefined, porosity: number): Efficiencies {
-  if (optics.model === 'constant') return constantEfficiencies(optics.qpr ?? 1);
+const lightLevelOf = ({ star, release }: RunInputs): LightLevel => ({ luminositySun: star.luminositySun, distanceAu: release.distanceAu });
+
+function efficienciesAt(inputs: RunInputs, nodes: OpticalNode[], exact: OpticalNode | undefined, porosity: number): Efficiencies {
+  const { optics } = inputs;
+  if (optics.model === 'constant') return constantEfficiencies(optics.qpr ?? 1, lightLevelOf(inputs));
   return exact ? nodeEfficiencies(exact) : betweenNodes(nodes, porosity);
 }
 

@@ -2,7 +2,7 @@ import type { FateBins, MaterialSummary, RunHistograms, RunSummary } from '@/ent
 import { betaOf } from '@/src/physics/beta';
 import { isUnbound } from '@/src/physics/fate';
 import { histogramEdgesM } from '@/src/physics/histogram';
-import { wilsonInterval } from '@/src/physics/wilson';
+import { effectiveRows, wilsonInterval } from '@/src/physics/wilson';
 import { micrometres } from '@/src/catalogues/shown-units';
 import type { GrainChunk } from './grain-chunk';
 import type { GrainResults } from './grain-results';
@@ -74,7 +74,7 @@ export class RunTally {
       const { count, unbound } = this.perMaterial.get(slug) ?? { count: 0, unbound: 0 };
       return materialSummary(this.prepared, material, count > 0 ? unbound / count : 0);
     });
-    const effectiveRows = this.squaredCounts > 0 ? this.total.number ** 2 / this.squaredCounts : 0;
+    const effective = effectiveRows(this.total.number, this.squaredCounts);
     const summary: RunSummary = {
       grains: this.rows,
       counted: this.total.number,
@@ -86,7 +86,7 @@ export class RunTally {
         areaShare: share(this.unbound, 'area'),
         massShare: share(this.unbound, 'mass'),
         expectedNumberShare: this.total.number > 0 ? this.expected / this.total.number : 0,
-        interval95: wilsonInterval(numberShare, effectiveRows),
+        interval95: wilsonInterval(numberShare, effective),
         repelled: this.repelled,
       },
       geometric: {
@@ -95,7 +95,7 @@ export class RunTally {
         massShare: share(this.geometric, 'mass'),
       },
       perMaterial,
-      warnings: runWarnings(this.prepared, { rows: this.rows, effectiveRows }),
+      warnings: runWarnings(this.prepared, { rows: this.rows, effectiveRows: effective }),
     };
     return { summary, histograms: { edgesUm: this.edgesM.map(micrometres), ...this.bins } };
   }
