@@ -10,7 +10,12 @@ export default defineConfig({
     projects: [
       {
         ...shared,
-        test: { name: 'unit', include: ['test/**/*.test.ts'], exclude: ['test/api/**', 'test/e2e/**'], testTimeout: 60_000 },
+        test: {
+          name: 'unit',
+          include: ['test/**/*.test.ts'],
+          exclude: ['test/api/**', 'test/e2e/**'],
+          testTimeout: 60_000,
+        },
       },
       {
         ...shared,

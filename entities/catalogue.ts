@@ -42,7 +42,10 @@ export const Catalogue = defineEntity({
   },
   indexes: [{ name: 'catalogue_of_group', properties: ['group', 'createdAt', 'id'] }],
   checks: [
-    { name: 'catalogue_rows_not_negative', expression: 'rows_accepted >= 0 and rows_rejected >= 0 and rows_blank >= 0' },
+    {
+      name: 'catalogue_rows_not_negative',
+      expression: 'rows_accepted >= 0 and rows_rejected >= 0 and rows_blank >= 0',
+    },
     { name: 'catalogue_sha256_form', expression: "sha256 ~ '^[0-9a-f]{64}$'" },
     { name: 'catalogue_failed_says_why', expression: "(status = 'failed') = (failure is not null)" },
   ],

@@ -2,9 +2,17 @@ import { p } from '@mikro-orm/core';
 import { randomUUID } from 'node:crypto';
 
 /** Random, so that knowing one id says nothing of another. */
-export const id = () => p.uuid().primary().onCreate(() => randomUUID());
+export const id = () =>
+  p
+    .uuid()
+    .primary()
+    .onCreate(() => randomUUID());
 
-export const createdAt = () => p.datetime().onCreate(() => new Date()).defaultRaw('now()');
+export const createdAt = () =>
+  p
+    .datetime()
+    .onCreate(() => new Date())
+    .defaultRaw('now()');
 
 export const moment = () => p.datetime();
 

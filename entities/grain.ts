@@ -21,7 +21,10 @@ export const Grain = defineEntity({
   checks: [
     { name: 'grain_radius_positive', expression: "radius_m > 0 and radius_m < 'infinity'" },
     { name: 'grain_density_positive', expression: "density_kg_m3 > 0 and density_kg_m3 < 'infinity'" },
-    { name: 'grain_sigmas_not_negative', expression: 'coalesce(radius_sigma_m, 0) >= 0 and coalesce(density_sigma_kg_m3, 0) >= 0' },
+    {
+      name: 'grain_sigmas_not_negative',
+      expression: 'coalesce(radius_sigma_m, 0) >= 0 and coalesce(density_sigma_kg_m3, 0) >= 0',
+    },
     { name: 'grain_count_positive', expression: "count > 0 and count < 'infinity'" },
   ],
 });

@@ -15,14 +15,21 @@ export class ClaimLost extends Error {
 }
 
 /** Says every second that the work goes on; when that is refused, the signal ends the work. */
-export async function whileBeating<T>(beat: () => Promise<boolean>, work: (signal: AbortSignal) => Promise<T>): Promise<T> {
+export async function whileBeating<T>(
+  beat: () => Promise<boolean>,
+  work: (signal: AbortSignal) => Promise<T>,
+): Promise<T> {
   const lost = new AbortController();
   let beating: Promise<void> | undefined;
   const timer = setInterval(() => {
     beating ??= beatOnce().finally(() => (beating = undefined));
   }, beatEveryMs);
   // A beat that fails for once (the database restarts) is tried again; the claim itself decides at the end.
-  const beatOnce = () => beat().then((held) => (held ? undefined : lost.abort(new ClaimLost())), () => undefined);
+  const beatOnce = () =>
+    beat().then(
+      (held) => (held ? undefined : lost.abort(new ClaimLost())),
+      () => undefined,
+    );
   try {
     return await work(lost.signal);
   } finally {

@@ -21,7 +21,11 @@ export type SortedRows = {
 type Row = Record<string, unknown> & { sort_key: string | number | null; ordinal: number };
 
 /** A page of rows in any order, by keyset (or offset, for a grid that jumps); rows without the sorted value come last. */
-export async function sortedRows<Item>(em: EntityManager, wanted: SortedRows, show: (row: Row) => Item): Promise<Page<Item> & { total: number }> {
+export async function sortedRows<Item>(
+  em: EntityManager,
+  wanted: SortedRows,
+  show: (row: Row) => Item,
+): Promise<Page<Item> & { total: number }> {
   const { conditions, limit, after } = wanted;
   const total = await countRows(em, wanted.from, conditions);
   const all = after === undefined ? conditions : [...conditions, beyond(wanted, after)];
@@ -39,12 +43,17 @@ export async function sortedRows<Item>(em: EntityManager, wanted: SortedRows, sh
 
 export async function countRows(em: EntityManager, from: string, conditions: Condition[]): Promise<number> {
   const { sql, values } = joined(conditions);
-  const [{ total }] = await em.getConnection().execute<[{ total: number }]>(`select count(*)::int as total from ${from} where ${sql}`, values);
+  const [{ total }] = await em
+    .getConnection()
+    .execute<[{ total: number }]>(`select count(*)::int as total from ${from} where ${sql}`, values);
   return total;
 }
 
 export function joined(conditions: Condition[]): Condition {
-  return { sql: conditions.map(({ sql }) => `(${sql})`).join(' and '), values: conditions.flatMap(({ values }) => values) };
+  return {
+    sql: conditions.map(({ sql }) => `(${sql})`).join(' and '),
+    values: conditions.flatMap(({ values }) => values),
+  };
 }
 
 function beyond({ sortBy, ordinal, order }: SortedRows, after: string): Condition {

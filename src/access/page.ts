@@ -16,7 +16,9 @@ export function decodeCursor(cursor: string, length: number): (string | number |
     position.length === length &&
     position.every((part) => part === null || typeof part === 'string' || typeof part === 'number');
   if (valid) return position as (string | number | null)[];
-  throw new Refusal('invalid', 'The cursor `after` is not one of ours.', [{ pointer: '/after', detail: 'is not a cursor of this list' }]);
+  throw new Refusal('invalid', 'The cursor `after` is not one of ours.', [
+    { pointer: '/after', detail: 'is not a cursor of this list' },
+  ]);
 }
 
 function parsed(cursor: string): unknown {

@@ -14,7 +14,11 @@ export const permissions = {
   'star.read': { does: 'See star presets', roles: ['pi', 'researcher', 'student', 'admin'], scope: 'read' },
   'material.read': { does: 'See materials', roles: ['pi', 'researcher', 'student', 'admin'], scope: 'read' },
   'curve.compute': { does: 'Use the calculator', roles: ['pi', 'researcher', 'student', 'admin'], scope: 'read' },
-  'token.manage': { does: 'Make and revoke own access tokens', roles: ['pi', 'researcher', 'student', 'admin'], scope: 'write' },
+  'token.manage': {
+    does: 'Make and revoke own access tokens',
+    roles: ['pi', 'researcher', 'student', 'admin'],
+    scope: 'write',
+  },
 } as const satisfies Record<string, { does: string; roles: readonly Role[]; scope: 'read' | 'write' }>;
 
 export type Permission = keyof typeof permissions;

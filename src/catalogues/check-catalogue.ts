@@ -22,6 +22,11 @@ export async function checkCatalogue(em: EntityManager, id: string, limits: { ma
 }
 
 async function giveUp(em: EntityManager, id: string, claim: string): Promise<void> {
-  const failure = 'The check ended unexpectedly on our side. Upload the file again; if it stays, tell the administrator.';
-  await em.nativeUpdate(Catalogue, { id, claim, status: 'checking' }, { status: 'failed', failure, claim: null, checkedAt: new Date() });
+  const failure =
+    'The check ended unexpectedly on our side. Upload the file again; if it stays, tell the administrator.';
+  await em.nativeUpdate(
+    Catalogue,
+    { id, claim, status: 'checking' },
+    { status: 'failed', failure, claim: null, checkedAt: new Date() },
+  );
 }

@@ -12,10 +12,17 @@ export async function claimCatalogue(em: EntityManager, id: string): Promise<str
   return taken.length === 1 ? claim : null;
 }
 
-export async function beatCatalogue(em: EntityManager, id: string, claim: string, rowsChecked: number): Promise<boolean> {
-  const kept = await em.getConnection().execute<{ id: string }[]>(
-    `update catalogue set heartbeat_at = now(), rows_checked = ? where id = ? and claim = ? and status = 'checking' returning id`,
-    [rowsChecked, id, claim],
-  );
+export async function beatCatalogue(
+  em: EntityManager,
+  id: string,
+  claim: string,
+  rowsChecked: number,
+): Promise<boolean> {
+  const kept = await em
+    .getConnection()
+    .execute<{ id: string }[]>(
+      `update catalogue set heartbeat_at = now(), rows_checked = ? where id = ? and claim = ? and status = 'checking' returning id`,
+      [rowsChecked, id, claim],
+    );
   return kept.length === 1;
 }

@@ -1,12 +1,23 @@
 import type { EntityManager, Loaded } from '@mikro-orm/postgresql';
 import { Catalogue } from '@/entities';
 import type { Actor } from '@/src/access/actor';
-import { defaultPageSize, newestFirst, newestFirstOrder, pageOfRows, type Page, type PageRequest } from '@/src/access/page';
+import {
+  defaultPageSize,
+  newestFirst,
+  newestFirstOrder,
+  pageOfRows,
+  type Page,
+  type PageRequest,
+} from '@/src/access/page';
 import { demand, ofOwnGroup } from '@/src/access/policy';
 import { notFound } from '@/src/errors';
 import type { CatalogueItem } from './schema';
 
-export async function listCatalogues(em: EntityManager, actor: Actor, { limit = defaultPageSize, after }: PageRequest = {}): Promise<Page<CatalogueItem>> {
+export async function listCatalogues(
+  em: EntityManager,
+  actor: Actor,
+  { limit = defaultPageSize, after }: PageRequest = {},
+): Promise<Page<CatalogueItem>> {
   demand(actor, 'catalogue.read');
   const rows = await em.find(
     Catalogue,

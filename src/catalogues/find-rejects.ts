@@ -21,17 +21,32 @@ export async function listRejects(
   const shown = rows.slice(0, limit);
   const last = shown.at(-1);
   const next = rows.length > limit && last ? encodeCursor([last.ordinal]) : null;
-  const items = shown.map(({ ordinal, line, column, value, reason, raw }) => ({ ordinal, line, column: column ?? null, value: value ?? null, reason, raw }));
+  const items = shown.map(({ ordinal, line, column, value, reason, raw }) => ({
+    ordinal,
+    line,
+    column: column ?? null,
+    value: value ?? null,
+    reason,
+    raw,
+  }));
   return { items, next, total };
 }
 
 const rejectsBeyond = (em: EntityManager, catalogue: string, ordinal: number, limit: number) =>
-  em.find(Reject, { catalogue, ordinal: { $gt: ordinal } }, { orderBy: { ordinal: 'asc' }, limit, disableIdentityMap: true });
+  em.find(
+    Reject,
+    { catalogue, ordinal: { $gt: ordinal } },
+    { orderBy: { ordinal: 'asc' }, limit, disableIdentityMap: true },
+  );
 
 const linesAtOnce = 2000;
 
 /** All rejects as CSV, piece by piece. */
-export async function rejectsCsv(em: EntityManager, actor: Actor, id: string): Promise<{ name: string; lines: AsyncGenerator<string> }> {
+export async function rejectsCsv(
+  em: EntityManager,
+  actor: Actor,
+  id: string,
+): Promise<{ name: string; lines: AsyncGenerator<string> }> {
   const catalogue = await ownCatalogue(em, actor, id);
   return { name: catalogue.name, lines: csvOf(em, catalogue.id) };
 }
@@ -42,7 +57,11 @@ async function* csvOf(em: EntityManager, catalogueId: string): AsyncGenerator<st
   while (true) {
     const rows = await rejectsBeyond(em, catalogueId, ordinal, linesAtOnce);
     if (rows.length === 0) return;
-    yield rows.map(({ line, column, value, reason, raw }) => rejectToCsvLine({ line, column: column ?? null, value: value ?? null, reason, raw })).join('');
+    yield rows
+      .map(({ line, column, value, reason, raw }) =>
+        rejectToCsvLine({ line, column: column ?? null, value: value ?? null, reason, raw }),
+      )
+      .join('');
     ordinal = rows[rows.length - 1].ordinal;
   }
 }

@@ -11,7 +11,18 @@ export type ImportLimits = { maxRows: number };
 export type ImportProgress = { claim: string; signal: AbortSignal; onRows(rows: number): void };
 
 const keptRejects = 100_000;
-const grainColumns = ['catalogue_id', 'ordinal', 'line', 'label', 'radius_m', 'radius_sigma_m', 'density_kg_m3', 'density_sigma_kg_m3', 'material', 'count'];
+const grainColumns = [
+  'catalogue_id',
+  'ordinal',
+  'line',
+  'label',
+  'radius_m',
+  'radius_sigma_m',
+  'density_kg_m3',
+  'density_sigma_kg_m3',
+  'material',
+  'count',
+];
 const rejectColumns = ['catalogue_id', 'ordinal', 'line', 'column_name', 'value', 'reason', 'raw'];
 
 /**
@@ -97,9 +108,15 @@ async function copyGrains(
     const reject = (row: RejectRow) => {
       if (rejects.length <= keptRejects) rejects.push(row);
     };
-    return readCatalogue(originalBytes(em, catalogue.id), { ...options, mapping, defaults: catalogue.defaults }, { grain, reject });
+    return readCatalogue(
+      originalBytes(em, catalogue.id),
+      { ...options, mapping, defaults: catalogue.defaults },
+      { grain, reject },
+    );
   });
-  const materials = [...byMaterial].map(([material, grains]) => ({ material, grains })).sort((a, b) => b.grains - a.grains);
+  const materials = [...byMaterial]
+    .map(([material, grains]) => ({ material, grains }))
+    .sort((a, b) => b.grains - a.grains);
   return { ...reading, materials };
 }
 

@@ -20,7 +20,8 @@ export async function spool(source: Readable, directory: string, limitBytes: num
   const measure = new Transform({
     transform(piece: Buffer, _encoding, done) {
       byteSize += piece.length;
-      if (byteSize > limitBytes) return done(new Refusal('tooLarge', `The file has more than ${Math.floor(limitBytes / 1048576)} MB.`));
+      if (byteSize > limitBytes)
+        return done(new Refusal('tooLarge', `The file has more than ${Math.floor(limitBytes / 1048576)} MB.`));
       hash.update(piece);
       done(null, piece);
     },

@@ -34,7 +34,11 @@ export type SpoolRules = { directory: string; limitBytes: number };
 export type UploadForm = { file: Spooled; fileName: string; fields: Record<string, string> };
 
 /** Reads a multipart form as it arrives: the file goes to the spool, never into memory. The caller removes it. */
-export async function readUploadForm(body: Request['body'], contentType: string | null, { directory, limitBytes }: SpoolRules): Promise<UploadForm> {
+export async function readUploadForm(
+  body: Request['body'],
+  contentType: string | null,
+  { directory, limitBytes }: SpoolRules,
+): Promise<UploadForm> {
   if (!body || !/^multipart\/form-data\b/i.test(contentType ?? '')) {
     throw new Refusal('unsupported', 'Send the catalogue as multipart/form-data with the fields file and name.');
   }
@@ -48,16 +52,24 @@ export async function readUploadForm(body: Request['body'], contentType: string 
   });
   form.on('file', (name, stream, fileName) => {
     if (name !== 'file') return void form.destroy(new Refusal('invalid', 'The file must be in the field file.'));
-    received = spool(stream, directory, limitBytes).then((file) => ({ file, fileName: (fileName || 'catalogue.csv').slice(0, 255) }));
+    received = spool(stream, directory, limitBytes).then((file) => ({
+      file,
+      fileName: (fileName || 'catalogue.csv').slice(0, 255),
+    }));
     received.catch((error: Error) => form.destroy(error));
   });
   for (const limit of ['filesLimit', 'fieldsLimit', 'partsLimit'] as const) {
-    form.on(limit, () => form.destroy(new Refusal('invalid', 'The form has more parts than the one file and its fields.')));
+    form.on(limit, () =>
+      form.destroy(new Refusal('invalid', 'The form has more parts than the one file and its fields.')),
+    );
   }
   try {
     await pipeline(Readable.fromWeb(body as Parameters<typeof Readable.fromWeb>[0]), form);
   } catch (error) {
-    await received?.then(({ file }) => file.remove(), () => undefined);
+    await received?.then(
+      ({ file }) => file.remove(),
+      () => undefined,
+    );
     throw refusalOf(error);
   }
   if (!received) throw new Refusal('invalid', 'The form has no file.', [{ pointer: '/file', detail: 'is needed' }]);
@@ -66,7 +78,10 @@ export async function readUploadForm(body: Request['body'], contentType: string 
 
 function parser(contentType: string) {
   try {
-    return busboy({ headers: { 'content-type': contentType } as IncomingHttpHeaders & { 'content-type': string }, limits });
+    return busboy({
+      headers: { 'content-type': contentType } as IncomingHttpHeaders & { 'content-type': string },
+      limits,
+    });
   } catch {
     throw new Refusal('unsupported', 'The form has no boundary: send multipart/form-data.');
   }
@@ -77,5 +92,7 @@ function refusalOf(error: unknown): unknown {
   if (error instanceof Refusal) return error;
   const message = error instanceof Error ? error.message : '';
   const brokenOff = /unexpected end|premature close|aborted|terminated|malformed/i.test(message);
-  return brokenOff ? new Refusal('invalid', 'The upload broke off before it was complete. Nothing was stored; send it again.') : error;
+  return brokenOff
+    ? new Refusal('invalid', 'The upload broke off before it was complete. Nothing was stored; send it again.')
+    : error;
 }

@@ -5,7 +5,10 @@ import { visiblePresets } from '@/src/access/policy';
 export type CurrentMaterial = Loaded<MaterialVersion, 'material'>;
 
 /** The newest published version of every material that the group may see, by slug; a group's own goes before everybody's. */
-export async function currentMaterials(em: EntityManager, groupId: string | null): Promise<Map<string, CurrentMaterial>> {
+export async function currentMaterials(
+  em: EntityManager,
+  groupId: string | null,
+): Promise<Map<string, CurrentMaterial>> {
   const versions = await em.find(
     MaterialVersion,
     { status: 'published', material: visiblePresets(groupId) },

@@ -12,7 +12,8 @@ export async function knownMaterials(em: EntityManager, groupId: string) {
 
 export function slugByName(current: Map<string, CurrentMaterial>): Map<string, string> {
   const names = new Map<string, string>();
-  for (const [slug, { name, material }] of current) for (const alias of [name, ...material.aliases]) names.set(alias.toLowerCase(), slug);
+  for (const [slug, { name, material }] of current)
+    for (const alias of [name, ...material.aliases]) names.set(alias.toLowerCase(), slug);
   for (const slug of current.keys()) names.set(slug.toLowerCase(), slug);
   return names;
 }

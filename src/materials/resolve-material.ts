@@ -9,7 +9,12 @@ import { slugByName } from './known-materials';
 export type MaterialChoice = { materialId?: string; slug?: string };
 
 /** A material by the id of one of its versions, or the newest version by slug or alias. */
-export async function resolveMaterial(em: EntityManager, groupId: string | null, choice: MaterialChoice, pointer: string): Promise<FrozenMaterial> {
+export async function resolveMaterial(
+  em: EntityManager,
+  groupId: string | null,
+  choice: MaterialChoice,
+  pointer: string,
+): Promise<FrozenMaterial> {
   if (choice.materialId !== undefined) {
     const version = await em.findOne(
       MaterialVersion,
@@ -30,7 +35,9 @@ export function materialNamed(current: Map<string, CurrentMaterial>, name: strin
 }
 
 function unknownMaterial(pointer: string, name: string): Refusal {
-  return new Refusal('unprocessable', `There is no material "${name}".`, [{ pointer, detail: 'is not the slug or alias of a material' }]);
+  return new Refusal('unprocessable', `There is no material "${name}".`, [
+    { pointer, detail: 'is not the slug or alias of a material' },
+  ]);
 }
 
 export const frozenMaterial = (version: CurrentMaterial): FrozenMaterial => ({

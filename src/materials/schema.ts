@@ -9,7 +9,9 @@ export const materialItem = z.object({
   aliases: z.array(z.string()),
   densityGCm3: z.number(),
   densitySource: z.string(),
-  validUm: z.tuple([z.number(), z.number()]).describe('Wavelengths over which the constants were fitted to measurements, um'),
+  validUm: z
+    .tuple([z.number(), z.number()])
+    .describe('Wavelengths over which the constants were fitted to measurements, um'),
   citation: z.string(),
   note: z.string(),
   status: z.enum(['draft', 'published', 'retired']),

@@ -10,7 +10,8 @@ async function demoAnswer(): Promise<void> {
   const deadline = Date.now() + longestWaitMs;
   for (const { run: name } of demo.catalogues) {
     const run = await endedRun(name, deadline);
-    if (run.status !== 'done' || !run.summary) throw new Error(`The run "${name}" is ${run.status}: ${run.error ?? 'no reason given'}`);
+    if (run.status !== 'done' || !run.summary)
+      throw new Error(`The run "${name}" is ${run.status}: ${run.error ?? 'no reason given'}`);
     console.log(`\n${name}`);
     for (const line of answerLines(run.summary)) console.log(`  ${line}`);
   }

@@ -30,12 +30,16 @@ async function seed(): Promise<void> {
 }
 
 async function demoPassword(): Promise<string> {
-  const kept = await readFile(factsFile, 'utf8').then((text) => (JSON.parse(text) as { demoPassword?: string }).demoPassword, () => undefined);
+  const kept = await readFile(factsFile, 'utf8').then(
+    (text) => (JSON.parse(text) as { demoPassword?: string }).demoPassword,
+    () => undefined,
+  );
   return kept ?? `winnow-${randomBytes(9).toString('base64url')}`;
 }
 
 async function seedPeople(em: EntityManager, password: string): Promise<void> {
-  const group = (await em.findOne(ResearchGroup, { name: demo.groupName })) ?? em.create(ResearchGroup, { name: demo.groupName });
+  const group =
+    (await em.findOne(ResearchGroup, { name: demo.groupName })) ?? em.create(ResearchGroup, { name: demo.groupName });
   for (const { name, email, role } of Object.values(demo.people)) {
     const person = await withPassword(em, name, email, password);
     const member = await em.findOne(Membership, { person, group });
@@ -86,7 +90,11 @@ async function untilReady(em: EntityManager, id: string): Promise<void> {
   throw new Error('The demonstration catalogue was not checked in time: does a worker run?');
 }
 
-async function seedRun(em: EntityManager, catalogueId: string, { run: name, star, eccentricity }: DemoCatalogue): Promise<void> {
+async function seedRun(
+  em: EntityManager,
+  catalogueId: string,
+  { run: name, star, eccentricity }: DemoCatalogue,
+): Promise<void> {
   const actor = await actorOfEmail(em, demo.people.demoResearcher.email);
   const there = await em.findOne(Run, { name, catalogue: catalogueId, status: { $in: ['queued', 'running', 'done'] } });
   if (there) return;

@@ -11,7 +11,11 @@ if (!email) {
 try {
   const em = await forkEm();
   const actor = await actorOfEmail(em, email);
-  const { token, expiresAt } = await makeToken(em, actor, { name: 'command line', scopes: ['read', 'write'], expiresInDays: 30 });
+  const { token, expiresAt } = await makeToken(em, actor, {
+    name: 'command line',
+    scopes: ['read', 'write'],
+    expiresInDays: 30,
+  });
   console.log(`For ${actor.name}, group ${actor.groupName}, valid until ${expiresAt.toISOString()}:`);
   console.log(token);
 } catch (error) {

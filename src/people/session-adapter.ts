@@ -5,7 +5,14 @@ import { Person, Session } from '@/entities';
 export type SessionAttributes = { groupId: string | null; userAgent: string; endsAt: Date };
 export type UserAttributes = { name: string; email: string; platformRole: 'member' | 'admin' };
 
-type SessionRow = { id: string; expiresAt: Date; endsAt: Date; userAgent: string; person: { id: string }; group?: { id: string } | null };
+type SessionRow = {
+  id: string;
+  expiresAt: Date;
+  endsAt: Date;
+  userAgent: string;
+  person: { id: string };
+  group?: { id: string } | null;
+};
 
 const toSession = (row: SessionRow): DatabaseSession => ({
   id: row.id,
@@ -18,7 +25,11 @@ const toSession = (row: SessionRow): DatabaseSession => ({
 export function sessionAdapter(em: EntityManager): Adapter {
   return {
     async getSessionAndUser(id): Promise<[DatabaseSession | null, DatabaseUser | null]> {
-      const row = await em.findOne(Session, { id, person: { disabledAt: null } }, { populate: ['person'], refresh: true });
+      const row = await em.findOne(
+        Session,
+        { id, person: { disabledAt: null } },
+        { populate: ['person'], refresh: true },
+      );
       if (!row) return [null, null];
       const { name, email, platformRole } = row.person;
       return [toSession(row), { id: row.person.id, attributes: { name, email, platformRole } }];

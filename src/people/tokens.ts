@@ -37,7 +37,11 @@ export async function makeToken(em: EntityManager, actor: Actor, request: TokenR
 
 export async function listTokens(em: EntityManager, actor: Actor) {
   demand(actor, 'token.manage');
-  const rows = await em.find(PersonalToken, { person: actor.personId }, { orderBy: { createdAt: 'desc' }, populate: ['group'] });
+  const rows = await em.find(
+    PersonalToken,
+    { person: actor.personId },
+    { orderBy: { createdAt: 'desc' }, populate: ['group'] },
+  );
   return rows.map((row) => ({
     id: row.id,
     name: row.name,
@@ -54,6 +58,10 @@ export type TokenItem = Awaited<ReturnType<typeof listTokens>>[number];
 
 export async function revokeToken(em: EntityManager, actor: Actor, id: string): Promise<void> {
   demand(actor, 'token.manage');
-  const changed = await em.nativeUpdate(PersonalToken, { id, person: actor.personId, revokedAt: null }, { revokedAt: new Date() });
+  const changed = await em.nativeUpdate(
+    PersonalToken,
+    { id, person: actor.personId, revokedAt: null },
+    { revokedAt: new Date() },
+  );
   if (changed === 0) throw notFound('token');
 }

@@ -16,7 +16,13 @@ function arealDensityBalance({ massSun, luminositySun }: ForceSource): number {
  * mass and luminosity in nominal solar units. Independent of the distance (point source, optically thin). Exact closed form,
  * rounding only. Source: Burns, Lamy & Soter (1979), Icarus 40, 1, eq. 19.
  */
-export function betaOf({ qpr, radiusM, densityKgM3, massSun, luminositySun }: ForceSource & { qpr: number; radiusM: number; densityKgM3: number }): number {
+export function betaOf({
+  qpr,
+  radiusM,
+  densityKgM3,
+  massSun,
+  luminositySun,
+}: ForceSource & { qpr: number; radiusM: number; densityKgM3: number }): number {
   return (0.75 * qpr * arealDensityBalance({ massSun, luminositySun })) / (densityKgM3 * radiusM);
 }
 
@@ -24,7 +30,12 @@ export function betaOf({ qpr, radiusM, densityKgM3, massSun, luminositySun }: Fo
  * Beta of any body from its cross-section towards the star per mass (m2 kg-1) and its radiation-pressure efficiency
  * (1 for a black body, 2 for a flat mirror facing the star). Source: as betaOf, with A/m in place of 3/(4 rho s).
  */
-export function betaOfAreaToMass({ qpr, areaToMassM2Kg, massSun, luminositySun }: ForceSource & { qpr: number; areaToMassM2Kg: number }): number {
+export function betaOfAreaToMass({
+  qpr,
+  areaToMassM2Kg,
+  massSun,
+  luminositySun,
+}: ForceSource & { qpr: number; areaToMassM2Kg: number }): number {
   return qpr * areaToMassM2Kg * arealDensityBalance({ massSun, luminositySun });
 }
 
@@ -32,7 +43,13 @@ export function betaOfAreaToMass({ qpr, areaToMassM2Kg, massSun, luminositySun }
  * Blow-out radius in m when Q_pr does not depend on the radius: below it beta >= betaCritical. Density in kg m-3.
  * A comparison, not a result, for radii below the star's typical wavelengths. Exact closed form.
  */
-export function geometricBlowoutRadiusM({ qpr, densityKgM3, betaCritical, massSun, luminositySun }: ForceSource & { qpr: number; densityKgM3: number; betaCritical: number }): number {
+export function geometricBlowoutRadiusM({
+  qpr,
+  densityKgM3,
+  betaCritical,
+  massSun,
+  luminositySun,
+}: ForceSource & { qpr: number; densityKgM3: number; betaCritical: number }): number {
   return betaOf({ qpr, radiusM: 1, densityKgM3, massSun, luminositySun }) / betaCritical;
 }
 
@@ -41,7 +58,15 @@ export function geometricBlowoutRadiusM({ qpr, densityKgM3, betaCritical, massSu
  * specularly and diffusely (Lambert), the rest absorbed and re-emitted equally from both faces. Range: tilt 0 to pi/2,
  * fractions 0 to 1 with sum at most 1. Standard solar-sail force model: McInnes (1999), Solar Sailing, section 2.6 (recalled from memory).
  */
-export function plateEfficiency({ tiltRad, specular, diffuse }: { tiltRad: number; specular: number; diffuse: number }): number {
+export function plateEfficiency({
+  tiltRad,
+  specular,
+  diffuse,
+}: {
+  tiltRad: number;
+  specular: number;
+  diffuse: number;
+}): number {
   const cosine = Math.cos(tiltRad);
   return cosine * (1 - specular + 2 * specular * cosine * cosine + (2 / 3) * diffuse * cosine);
 }

@@ -4,7 +4,15 @@ import { AU, EPS0, GM_SUN } from './constants';
  * Charge per mass (C kg-1) of a sphere at this surface potential (V): 3 eps0 phi/(rho s^2), radius in m, density in kg m-3.
  * Valid without field emission, for grains small against the plasma's Debye length. Exact closed form. Source: capacitance of a sphere.
  */
-export function chargePerMass({ potentialV, radiusM, densityKgM3 }: { potentialV: number; radiusM: number; densityKgM3: number }): number {
+export function chargePerMass({
+  potentialV,
+  radiusM,
+  densityKgM3,
+}: {
+  potentialV: number;
+  radiusM: number;
+  densityKgM3: number;
+}): number {
   return (3 * EPS0 * potentialV) / (densityKgM3 * radiusM * radiusM);
 }
 
@@ -27,7 +35,15 @@ export interface LorentzSetting {
  * Order of magnitude: field and potential vary by factors. Above 0.1 the force matters, above 1 a fate from beta alone is not reliable.
  * Source: as tabulated for interplanetary grains by Gruen et al. (1994), Planet. Space Sci. 42 (recalled from memory), reproduced within 2 %.
  */
-export function lorentzRatio({ potentialV, fieldNT, radiusM, densityKgM3, distanceAu, massSun, windSpeedKmS = USUAL_WIND_SPEED_KM_S }: LorentzSetting): number {
+export function lorentzRatio({
+  potentialV,
+  fieldNT,
+  radiusM,
+  densityKgM3,
+  distanceAu,
+  massSun,
+  windSpeedKmS = USUAL_WIND_SPEED_KM_S,
+}: LorentzSetting): number {
   const perMass = Math.abs(chargePerMass({ potentialV, radiusM, densityKgM3 }));
   const acceleration = perMass * windSpeedKmS * 1000 * fieldNT * 1e-9;
   return (acceleration * (distanceAu * AU) ** 2) / (massSun * GM_SUN);

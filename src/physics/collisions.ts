@@ -9,7 +9,15 @@ export function orbitalPeriodYr(distanceAu: number, massSun: number): number {
  * Time between collisions (yr) in a disc of face-on optical depth tau at this distance (au): P/(4 pi tau). Order of magnitude:
  * other authors' factors differ by two to three. Source: Wyatt (2005), A&A 433, 1007; Wyatt et al. (1999), ApJ 527, 918.
  */
-export function discCollisionTimeYr({ distanceAu, massSun, opticalDepth }: { distanceAu: number; massSun: number; opticalDepth: number }): number {
+export function discCollisionTimeYr({
+  distanceAu,
+  massSun,
+  opticalDepth,
+}: {
+  distanceAu: number;
+  massSun: number;
+  opticalDepth: number;
+}): number {
   return orbitalPeriodYr(distanceAu, massSun) / (4 * Math.PI * opticalDepth);
 }
 

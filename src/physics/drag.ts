@@ -34,7 +34,17 @@ function hypergeometric(a: number, b: number, c: number, z: number): number {
  * alpha = beta GM/c. Elements are the osculating ones in the weakened gravity. Range: 0 <= e < 1, beta > 0; speeds well below
  * light. Relative error below 1e-12 of the formula. Source: Wyatt & Whipple (1950), ApJ 111, 134.
  */
-export function prTimeYr({ semiMajorAxisAu, eccentricity, beta, massSun }: { semiMajorAxisAu: number; eccentricity: number; beta: number; massSun: number }): number {
+export function prTimeYr({
+  semiMajorAxisAu,
+  eccentricity,
+  beta,
+  massSun,
+}: {
+  semiMajorAxisAu: number;
+  eccentricity: number;
+  beta: number;
+  massSun: number;
+}): number {
   const alpha = (beta * massSun * GM_SUN) / C;
   const circularYr = (semiMajorAxisAu * AU) ** 2 / (4 * alpha) / YEAR_S;
   const complement = (1 - eccentricity) * (1 + eccentricity);
@@ -45,7 +55,17 @@ export function prTimeYr({ semiMajorAxisAu, eccentricity, beta, massSun }: { sem
  * Poynting-Robertson time (yr) between two circular orbits (au): (r0^2 - r1^2)/(4 alpha). Exact closed form. Source: Burns,
  * Lamy & Soter (1979), Icarus 40, 1, eq. 50.
  */
-export function prTimeCircularYr({ fromAu, toAu = 0, beta, massSun }: { fromAu: number; toAu?: number; beta: number; massSun: number }): number {
+export function prTimeCircularYr({
+  fromAu,
+  toAu = 0,
+  beta,
+  massSun,
+}: {
+  fromAu: number;
+  toAu?: number;
+  beta: number;
+  massSun: number;
+}): number {
   const alpha = (beta * massSun * GM_SUN) / C;
   return ((fromAu - toAu) * (fromAu + toAu) * AU * AU) / (4 * alpha) / YEAR_S;
 }
@@ -69,7 +89,13 @@ export interface WindFactors {
  * (Q_sw/Q_pr) Mdot c^2/L. The mass loss in kg carries the uncertainty of G, 2e-5. Order-of-magnitude physics: Q_sw is
  * uncertain by tens of per cent. Source: Burns, Lamy & Soter (1979), section IV; Gustafson (1994), Annu. Rev. Earth Planet. Sci. 22, 553.
  */
-export function windFactors({ massLossSunPerYr, speedKmS, qsw, qpr, luminositySun }: Wind & { qpr: number; luminositySun: number }): WindFactors {
+export function windFactors({
+  massLossSunPerYr,
+  speedKmS,
+  qsw,
+  qpr,
+  luminositySun,
+}: Wind & { qpr: number; luminositySun: number }): WindFactors {
   const massLossKgS = (massLossSunPerYr * GM_SUN) / G_NEWTON / YEAR_S;
   const perSpeed = ((qsw / qpr) * massLossKgS * C) / (luminositySun * L_SUN);
   return { pressureRatio: perSpeed * speedKmS * 1000, dragRatio: perSpeed * C };

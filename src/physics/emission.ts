@@ -36,7 +36,9 @@ export interface Emission {
  */
 export function buildEmission(recipe: OpticsRecipe): Emission {
   const wavelengths = Math.ceil((LN_WAVELENGTH_MAX - LN_WAVELENGTH_MIN) / LN_WAVELENGTH_STEP) + 1;
-  const wavelengthM = Float64Array.from({ length: wavelengths }, (_, node) => Math.exp(LN_WAVELENGTH_MIN + node * LN_WAVELENGTH_STEP));
+  const wavelengthM = Float64Array.from({ length: wavelengths }, (_, node) =>
+    Math.exp(LN_WAVELENGTH_MIN + node * LN_WAVELENGTH_STEP),
+  );
   const lnRadiusMin = Math.log(CURVE_RADIUS_MIN_M);
   const radii = Math.round(Math.log10(CURVE_RADIUS_MAX_M / CURVE_RADIUS_MIN_M) * RADII_PER_DECADE) + 1;
   const lnRadiusStep = Math.log(CURVE_RADIUS_MAX_M / CURVE_RADIUS_MIN_M) / (radii - 1);
@@ -95,7 +97,8 @@ function absorptionOf(sampler: GrainSampler, wavelengthM: Float64Array): (radius
   return (radiusM, node) => {
     const x = (2 * Math.PI * radiusM) / wavelengthM[node];
     if (x <= LARGEST_MIE_X) return mie(radiusM, node);
-    const known = large.get(node) ?? largeAbsorption(sampler, node, mie((LARGEST_MIE_X * wavelengthM[node]) / (2 * Math.PI), node));
+    const known =
+      large.get(node) ?? largeAbsorption(sampler, node, mie((LARGEST_MIE_X * wavelengthM[node]) / (2 * Math.PI), node));
     large.set(node, known);
     return known(x);
   };

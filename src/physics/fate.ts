@@ -20,7 +20,15 @@ export type Regime = 'unbound' | 'drag' | 'collisions';
  * The process that ends a grain's stay first: blow-out acts within about one orbit and so wins whenever it acts; otherwise the
  * shorter of drag and collision time (yr; null where it does not exist). Without a disc it is drag.
  */
-export function regimeOf({ isUnbound: unbound, dragTimeYr, collisionTimeYr }: { isUnbound: boolean; dragTimeYr: number | null; collisionTimeYr: number | null }): Regime {
+export function regimeOf({
+  isUnbound: unbound,
+  dragTimeYr,
+  collisionTimeYr,
+}: {
+  isUnbound: boolean;
+  dragTimeYr: number | null;
+  collisionTimeYr: number | null;
+}): Regime {
   if (unbound) return 'unbound';
   if (collisionTimeYr === null) return 'drag';
   return dragTimeYr === null || collisionTimeYr < dragTimeYr ? 'collisions' : 'drag';

@@ -50,7 +50,8 @@ export function grainSampler(recipe: OpticsRecipe, wavelengthM: Float64Array): G
       let pressure = 0;
       let absorption = 0;
       for (const { weight, core, mantle } of components) {
-        if (mantle) coatedInto(efficiencies, coreShare * x, x, [core.n[node], core.k[node]], [mantle.n[node], mantle.k[node]]);
+        if (mantle)
+          coatedInto(efficiencies, coreShare * x, x, [core.n[node], core.k[node]], [mantle.n[node], mantle.k[node]]);
         else mieInto(efficiencies, x, core.n[node], core.k[node]);
         pressure += weight * efficiencies[Q_PR];
         absorption += weight * efficiencies[Q_ABS];
@@ -71,7 +72,8 @@ export function grainSampler(recipe: OpticsRecipe, wavelengthM: Float64Array): G
 function componentsOf({ core, porosity = 0, mixing = 'bruggeman', mantle }: OpticsRecipe, nodes: number): Component[] {
   const index = (at: NodeIndex['at']): NodeIndex => ({ at, n: new Float64Array(nodes), k: new Float64Array(nodes) });
   const ofModel = (model: IndexModel) => index((wavelengthM) => refractiveIndex(model, wavelengthM));
-  const porous = (model: IndexModel) => index((wavelengthM) => porousIndex(refractiveIndex(model, wavelengthM), porosity, mixing));
+  const porous = (model: IndexModel) =>
+    index((wavelengthM) => porousIndex(refractiveIndex(model, wavelengthM), porosity, mixing));
   return core.components.flatMap(({ weight, model }) =>
     (mantle?.optics.components ?? [null]).map((coat) => ({
       weight: weight * (coat?.weight ?? 1),

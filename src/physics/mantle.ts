@@ -8,7 +8,15 @@ const EXTRA_TERMS = 3;
 const LARGEST_DOWNWARD_PSI_X = 3;
 
 /** Mean density (kg m-3) of a coated grain from both densities and the mantle's share of the volume. Exact. */
-export function meanDensityOfCoated({ coreKgM3, mantleKgM3, mantleVolumeFraction }: { coreKgM3: number; mantleKgM3: number; mantleVolumeFraction: number }): number {
+export function meanDensityOfCoated({
+  coreKgM3,
+  mantleKgM3,
+  mantleVolumeFraction,
+}: {
+  coreKgM3: number;
+  mantleKgM3: number;
+  mantleVolumeFraction: number;
+}): number {
   return coreKgM3 + (mantleKgM3 - coreKgM3) * mantleVolumeFraction;
 }
 
@@ -54,7 +62,14 @@ function cotangent([a, b]: Complex): Complex {
  * Relative accuracy 1e-8 up to x = 1000; absorption is summed on its own, so that it stays accurate when k is tiny. Source: Bohren &
  * Huffman (1983), section 8.1, in the recurrences of Yang (2003), Appl. Opt. 42, 1710.
  */
-export function coatedEfficiencies(xCore: number, xTotal: number, nCore: number, kCore: number, nMantle: number, kMantle: number): MieEfficiencies {
+export function coatedEfficiencies(
+  xCore: number,
+  xTotal: number,
+  nCore: number,
+  kCore: number,
+  nMantle: number,
+  kMantle: number,
+): MieEfficiencies {
   const out = new Float64Array(5);
   coatedInto(out, xCore, xTotal, [nCore, kCore], [nMantle, kMantle]);
   return { qExt: out[Q_EXT], qSca: out[Q_SCA], qAbs: out[Q_ABS], g: out[G], qPr: out[Q_PR] };
@@ -62,7 +77,8 @@ export function coatedEfficiencies(xCore: number, xTotal: number, nCore: number,
 
 /** Writes [qExt, qSca, qAbs, g, qPr] as `mieInto` does; inputs and accuracy as `coatedEfficiencies`. */
 export function coatedInto(out: Float64Array, xCore: number, xTotal: number, core: Complex, mantle: Complex): void {
-  if (xCore >= xTotal || (core[0] === mantle[0] && core[1] === mantle[1])) return mieInto(out, xTotal, core[0], core[1]);
+  if (xCore >= xTotal || (core[0] === mantle[0] && core[1] === mantle[1]))
+    return mieInto(out, xTotal, core[0], core[1]);
   const terms = Math.ceil(xTotal + 4.05 * Math.cbrt(xTotal) + EXTRA_TERMS);
   const derivatives = layerDerivatives(xCore, xTotal, core, mantle, terms);
   const psiTable = xTotal < LARGEST_DOWNWARD_PSI_X ? scaledPsi(xTotal, terms) : null;
@@ -86,7 +102,8 @@ export function coatedInto(out: Float64Array, xCore: number, xTotal: number, cor
     scattering += degeneracy * (a.square + b.square);
     absorption += degeneracy * (a.loss + b.loss);
     asymmetry +=
-      (((order - 1) * (order + 1)) / order) * (inner(last[0], a) + inner(last[1], b)) + (degeneracy / (order * (order + 1))) * inner(a, b);
+      (((order - 1) * (order + 1)) / order) * (inner(last[0], a) + inner(last[1], b)) +
+      (degeneracy / (order * (order + 1))) * inner(a, b);
     last = [a, b];
     psi0 = psi1;
     psi1 = psi;
@@ -103,7 +120,13 @@ export function coatedInto(out: Float64Array, xCore: number, xTotal: number, cor
 }
 
 /** Logarithmic derivatives at the outer face for the two polarisations, order after order from 1. */
-function layerDerivatives(xCore: number, xTotal: number, core: Complex, mantle: Complex, terms: number): { next(): [Complex, Complex] } {
+function layerDerivatives(
+  xCore: number,
+  xTotal: number,
+  core: Complex,
+  mantle: Complex,
+  terms: number,
+): { next(): [Complex, Complex] } {
   const z1 = scale(mantle, xCore);
   const z2 = scale(mantle, xTotal);
   const coreD = psiDerivatives(xCore, core, terms);
@@ -137,7 +160,16 @@ function firstRatio(z1: Complex, z2: Complex): Complex {
 }
 
 /** Logarithmic derivative at the outer face, seen from the inner one; the two polarisations swap the indices. */
-function layer(outside: Complex, inside: Complex, core: Complex, inner: Complex, innerZeta: Complex, outer: Complex, outerZeta: Complex, q: Complex): Complex {
+function layer(
+  outside: Complex,
+  inside: Complex,
+  core: Complex,
+  inner: Complex,
+  innerZeta: Complex,
+  outer: Complex,
+  outerZeta: Complex,
+  q: Complex,
+): Complex {
   const g1 = subtract(multiply(outside, core), multiply(inside, inner));
   const g2 = subtract(multiply(outside, core), multiply(inside, innerZeta));
   const weighted = multiply(q, g1);

@@ -37,7 +37,8 @@ export function bruggemanTwo(epsA: Complex, epsB: Complex, fractionA: number): [
   const [plus, minus] = bruggemanRoots(epsA, epsB, fractionA);
   const lossy = (eps: Complex): Complex => [eps[0], eps[1] + ADDED_LOSS * modulusOf(eps)];
   const [lossyPlus, lossyMinus] = bruggemanRoots(lossy(epsA), lossy(epsB), fractionA);
-  const isPlus = Math.sign(lossyPlus[1]) === Math.sign(lossyMinus[1]) ? lossyPlus[0] >= lossyMinus[0] : lossyPlus[1] > 0;
+  const isPlus =
+    Math.sign(lossyPlus[1]) === Math.sign(lossyMinus[1]) ? lossyPlus[0] >= lossyMinus[0] : lossyPlus[1] > 0;
   const [re, im] = isPlus ? plus : minus;
   return [re, Math.max(0, im)];
 }
@@ -77,8 +78,14 @@ export function maxwellGarnett(epsMatrix: Complex, epsInclusion: Complex, fracti
 }
 
 /** Index [n, k] of a solid with vacuum voids of this share of the volume; with Maxwell Garnett the solid is the matrix. */
-export function porousIndex(solid: readonly [number, number], porosity: number, mixing: 'bruggeman' | 'maxwellGarnett'): [number, number] {
+export function porousIndex(
+  solid: readonly [number, number],
+  porosity: number,
+  mixing: 'bruggeman' | 'maxwellGarnett',
+): [number, number] {
   if (porosity === 0) return [solid[0], solid[1]];
   const eps = indexToEps(solid);
-  return epsToIndex(mixing === 'maxwellGarnett' ? maxwellGarnett(eps, VACUUM_EPS, porosity) : bruggemanTwo(VACUUM_EPS, eps, porosity));
+  return epsToIndex(
+    mixing === 'maxwellGarnett' ? maxwellGarnett(eps, VACUUM_EPS, porosity) : bruggemanTwo(VACUUM_EPS, eps, porosity),
+  );
 }

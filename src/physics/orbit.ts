@@ -66,7 +66,17 @@ export function semiMajorAxisFromDistance(distance: number, eccentricity: number
  * bp on a Keplerian orbit in GM(1-bp): 1 - (1-bp)(1 - r/2a). Range: 0 <= e < 1, 0 <= bp < 1. Exact closed form. Source:
  * energy balance at release; for bp = 0 Harwit (1963), Kresak (1976) (recalled from memory).
  */
-export function criticalBeta({ eccentricity, at, trueAnomalyDeg, parentBeta = 0 }: { eccentricity: number; at: ReleasePoint; trueAnomalyDeg?: number; parentBeta?: number }): number {
+export function criticalBeta({
+  eccentricity,
+  at,
+  trueAnomalyDeg,
+  parentBeta = 0,
+}: {
+  eccentricity: number;
+  at: ReleasePoint;
+  trueAnomalyDeg?: number;
+  parentBeta?: number;
+}): number {
   const half = distanceOverAxis(eccentricity, trueAnomalyDegOf({ at, trueAnomalyDeg })) / 2;
   return parentBeta === 0 ? half : 1 - (1 - parentBeta) * (1 - half);
 }
@@ -81,7 +91,14 @@ const relativeBeta = (beta: number, parentBeta: number): number => (beta - paren
  * within 1e-12 of the threshold. Source: energy and angular momentum at release (Burns, Lamy & Soter 1979, section VI; the shift from the
  * eccentricity vector).
  */
-export function orbitAfterRelease({ semiMajorAxisAu, eccentricity, trueAnomalyDeg, beta, massSun, parentBeta = 0 }: Release): ReleasedOrbit {
+export function orbitAfterRelease({
+  semiMajorAxisAu,
+  eccentricity,
+  trueAnomalyDeg,
+  beta,
+  massSun,
+  parentBeta = 0,
+}: Release): ReleasedOrbit {
   const b = relativeBeta(beta, parentBeta);
   const cosine = cosDeg(trueAnomalyDeg);
   const twiceAxisOverDistance = 2 / distanceOverAxis(eccentricity, trueAnomalyDeg);
@@ -98,7 +115,10 @@ export function orbitAfterRelease({ semiMajorAxisAu, eccentricity, trueAnomalyDe
     fate: unbound ? 'unbound' : 'bound',
     semiMajorAxisAu: unbound ? null : (semiMajorAxisAu * weakening) / -excess,
     eccentricity: newEccentricity,
-    pericentreAu: newEccentricity === null ? null : latusRectum / (weakening > 0 ? weakening * (1 + newEccentricity) : -weakening * (newEccentricity - 1)),
+    pericentreAu:
+      newEccentricity === null
+        ? null
+        : latusRectum / (weakening > 0 ? weakening * (1 + newEccentricity) : -weakening * (newEccentricity - 1)),
     pericentreShiftDeg: isStraight ? null : Math.atan2(b * sinDeg(trueAnomalyDeg), eccentricity + b * cosine) / DEGREE,
     vInfKmS: unbound ? Math.sqrt(Math.max(0, circularSpeed2 * excess)) / 1000 : null,
   };

@@ -11,7 +11,12 @@ export function lnSigmaOf(radiusM: number, radiusSigmaM: number): number {
 /** Standard deviation of ln s from a multiplicative one-sigma error factor on the mass (m ~ s^3). Exact. */
 export const lnSigmaOfMassFactor = (factor: number): number => Math.log(factor) / 3;
 
-export type Probability = (radiusM: number, radiusSigmaM: number, densityKgM3: number, densitySigmaKgM3: number) => number;
+export type Probability = (
+  radiusM: number,
+  radiusSigmaM: number,
+  densityKgM3: number,
+  densitySigmaKgM3: number,
+) => number;
 
 /** Beyond so many standard deviations nothing is left that counts (6e-16). */
 const REACH = 8;
@@ -27,7 +32,10 @@ const FEWEST_PANELS = 4;
  * of normal-CDF differences over those windows; with one it is the integral over ln s of the density's distribution function at f(s), by
  * adaptive Gauss-Kronrod. Absolute error below 1e-5 (compared with a dense two-dimensional sum in the tests). Source: definition.
  */
-export function prepareProbability(qprAt: (radiusM: number) => number, { massSun, luminositySun, betaCritical }: ForceSource & { betaCritical: number }): Probability {
+export function prepareProbability(
+  qprAt: (radiusM: number) => number,
+  { massSun, luminositySun, betaCritical }: ForceSource & { betaCritical: number },
+): Probability {
   const thresholdTimesRadius = betaOf({ qpr: 1, radiusM: 1, densityKgM3: 1, massSun, luminositySun }) / betaCritical;
   const lnThreshold = (lnRadius: number) => Math.log(thresholdTimesRadius * qprAt(Math.exp(lnRadius))) - lnRadius;
   let windowsAt: ((lnDensity: number) => LnWindows) | undefined;

@@ -25,11 +25,18 @@ export function blackBodyTemperatureK(luminositySun: number, distanceAu: number)
  * about 10 nm heat up photon by photon and have no single temperature. Solved at 12 radii per decade, spline in between.
  * Source: energy balance, Bohren & Huffman (1983), section 4.7.
  */
-export function temperatureCurve(curve: Curve, emission: Emission, luminositySun: number, distanceAu: number): (radiusM: number) => number {
+export function temperatureCurve(
+  curve: Curve,
+  emission: Emission,
+  luminositySun: number,
+  distanceAu: number,
+): (radiusM: number) => number {
   const { lnRadiusMin, lnRadiusStep, radii } = emission;
   const lnBalance = Math.log(balance(luminositySun, distanceAu));
   const lnRadius = Float64Array.from({ length: radii }, (_, row) => lnRadiusMin + row * lnRadiusStep);
-  const lnT = lnRadius.map((at, row) => lnTemperature(emission, row, lnBalance + Math.log(qabsAt(curve, Math.exp(at)))));
+  const lnT = lnRadius.map((at, row) =>
+    lnTemperature(emission, row, lnBalance + Math.log(qabsAt(curve, Math.exp(at)))),
+  );
   const slopes = splineSlopes(lnRadius, lnT);
   return (radiusM) => {
     const at = Math.min(lnRadius[radii - 1], Math.max(lnRadiusMin, Math.log(radiusM)));

@@ -42,14 +42,18 @@ interface Point {
 
 function withBends(g: (lnRadius: number) => number, low: number, high: number): Point[] {
   const point = (at: number): Point => ({ at, value: g(at) });
-  const even = Array.from({ length: CURVE_INTERVALS + 1 }, (_, index) => point(low + ((high - low) * index) / CURVE_INTERVALS));
+  const even = Array.from({ length: CURVE_INTERVALS + 1 }, (_, index) =>
+    point(low + ((high - low) * index) / CURVE_INTERVALS),
+  );
   const bends: Point[] = [];
   for (let index = 1; index < CURVE_INTERVALS; index++) {
     const rise = even[index].value - even[index - 1].value;
     const fall = even[index].value - even[index + 1].value;
     if (rise * fall <= 0) continue;
     const sign = Math.sign(rise);
-    bends.push(point(goldenMaximum((at) => sign * g(at), even[index - 1].at, even[index + 1].at, LN_EXTREMUM_TOLERANCE)));
+    bends.push(
+      point(goldenMaximum((at) => sign * g(at), even[index - 1].at, even[index + 1].at, LN_EXTREMUM_TOLERANCE)),
+    );
   }
   return [...even, ...bends].sort((a, b) => a.at - b.at);
 }

@@ -6,7 +6,11 @@ import { Refusal } from '@/src/errors';
 import { ownRun } from './find-runs';
 
 /** Ends a run that has not ended; its worker notices within a second and nothing of it is stored. */
-export async function cancelRun(em: EntityManager, actor: Actor, id: string): Promise<{ id: string; status: 'cancelled' }> {
+export async function cancelRun(
+  em: EntityManager,
+  actor: Actor,
+  id: string,
+): Promise<{ id: string; status: 'cancelled' }> {
   demand(actor, 'run.cancel');
   const changed = await em.nativeUpdate(
     Run,

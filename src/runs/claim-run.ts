@@ -16,10 +16,17 @@ export async function claimRun(em: EntityManager, id: string): Promise<{ claim: 
   return taken ? { claim, attempts: taken.attempts } : null;
 }
 
-export async function beatRun(em: EntityManager, id: string, claim: string, { progress, stage }: RunProgress): Promise<boolean> {
-  const kept = await em.getConnection().execute<{ id: string }[]>(
-    `update run set heartbeat_at = now(), progress = ?, stage = ? where id = ? and claim = ? and status = 'running' returning id`,
-    [Math.min(1, Math.max(0, progress)), stage, id, claim],
-  );
+export async function beatRun(
+  em: EntityManager,
+  id: string,
+  claim: string,
+  { progress, stage }: RunProgress,
+): Promise<boolean> {
+  const kept = await em
+    .getConnection()
+    .execute<{ id: string }[]>(
+      `update run set heartbeat_at = now(), progress = ?, stage = ? where id = ? and claim = ? and status = 'running' returning id`,
+      [Math.min(1, Math.max(0, progress)), stage, id, claim],
+    );
   return kept.length === 1;
 }

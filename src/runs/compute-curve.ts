@@ -23,8 +23,11 @@ export async function computeCurve(em: EntityManager, actor: Actor, request: Cur
   const star = await resolveStar(em, actor.groupId, request);
   const core = await resolveMaterial(em, actor.groupId, request, '/slug');
   const optics: RunOptics = request.optics ?? { model: 'mie' };
-  const mantle = optics.mantle && (await resolveMaterial(em, actor.groupId, { slug: optics.mantle.material }, '/optics/mantle/material'));
-  const densityKgM3 = request.densityGCm3 === undefined ? ownDensityKgM3(core, optics, mantle) : request.densityGCm3 * 1000;
+  const mantle =
+    optics.mantle &&
+    (await resolveMaterial(em, actor.groupId, { slug: optics.mantle.material }, '/optics/mantle/material'));
+  const densityKgM3 =
+    request.densityGCm3 === undefined ? ownDensityKgM3(core, optics, mantle) : request.densityGCm3 * 1000;
   const efficiency = await efficiencyOf();
   const betaCritical = request.betaCritical ?? circularRelease;
   const grain = { densityKgM3, massSun: star.massSun, luminositySun: star.luminositySun };
@@ -46,8 +49,10 @@ export async function computeCurve(em: EntityManager, actor: Actor, request: Cur
     if (optics.model === 'constant') {
       return { qpr: () => optics.qpr ?? 1, relativeErrorBound: 0, shareOutsideValidRange: 0, notes: [] };
     }
-    const frozenOptics = mantle && optics.mantle ? { ...optics, mantle: { ...optics.mantle, material: mantle.slug } } : optics;
-    const porosity = optics.porosity === 'fromDensity' ? porosityOf(densityKgM3, core.densityKgM3) : (optics.porosity ?? 0);
+    const frozenOptics =
+      mantle && optics.mantle ? { ...optics, mantle: { ...optics.mantle, material: mantle.slug } } : optics;
+    const porosity =
+      optics.porosity === 'fromDensity' ? porosityOf(densityKgM3, core.densityKgM3) : (optics.porosity ?? 0);
     const recipe = recipeOf(core, frozenOptics, mantle ? [mantle] : [], porosity);
     const curve = await recentCurve(em, { recipe, spectrum: spectrumOf(star) });
     const { relativeErrorBound, shareOutsideValidRange, notes } = curve;
@@ -56,7 +61,16 @@ export async function computeCurve(em: EntityManager, actor: Actor, request: Cur
 }
 
 /** Of a grain as described: voids and mantle counted in. */
-function ownDensityKgM3(core: FrozenMaterial, { porosity, mantle: coat }: RunOptics, mantle: FrozenMaterial | undefined): number {
-  if (mantle && coat) return meanDensityOfCoated({ coreKgM3: core.densityKgM3, mantleKgM3: mantle.densityKgM3, mantleVolumeFraction: coat.volumeFraction });
+function ownDensityKgM3(
+  core: FrozenMaterial,
+  { porosity, mantle: coat }: RunOptics,
+  mantle: FrozenMaterial | undefined,
+): number {
+  if (mantle && coat)
+    return meanDensityOfCoated({
+      coreKgM3: core.densityKgM3,
+      mantleKgM3: mantle.densityKgM3,
+      mantleVolumeFraction: coat.volumeFraction,
+    });
   return core.densityKgM3 * (1 - (typeof porosity === 'number' ? porosity : 0));
 }

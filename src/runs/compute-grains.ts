@@ -32,7 +32,12 @@ export function computeGrains({ inputs, wind, materials }: PreparedRun, chunk: G
     const orbit = orbitAfterRelease({ ...released, beta });
     const bound = !unbound && orbit.semiMajorAxisAu !== null && orbit.eccentricity !== null;
     const dragYr = bound
-      ? prTimeYr({ semiMajorAxisAu: orbit.semiMajorAxisAu!, eccentricity: orbit.eccentricity!, beta: betaOf({ ...light, qpr }), massSun }) /
+      ? prTimeYr({
+          semiMajorAxisAu: orbit.semiMajorAxisAu!,
+          eccentricity: orbit.eccentricity!,
+          beta: betaOf({ ...light, qpr }),
+          massSun,
+        }) /
         (1 + wind.dragRatioTimesQpr / qpr)
       : NaN;
     results.qpr[row] = qpr;
@@ -47,7 +52,11 @@ export function computeGrains({ inputs, wind, materials }: PreparedRun, chunk: G
     results.temperatureK[row] = optics.efficiencies.temperatureK(radiusM);
     if (charging) results.lorentzRatio[row] = lorentzRatio({ ...charging, radiusM, densityKgM3, distanceAu, massSun });
     results.regime[row] = regimes.indexOf(
-      regimeOf({ isUnbound: unbound, dragTimeYr: bound ? dragYr : null, collisionTimeYr: disc ? collisionTimeYr : null }),
+      regimeOf({
+        isUnbound: unbound,
+        dragTimeYr: bound ? dragYr : null,
+        collisionTimeYr: disc ? collisionTimeYr : null,
+      }),
     );
   }
   return results;

@@ -11,7 +11,12 @@ export const spectrumOf = ({ spectrum, teffK }: FrozenStar): Spectrum =>
   spectrum ? { kind: 'table', ...spectrum } : { kind: 'planck', teffK };
 
 /** What a grain of this material is made of; `porosity` is the grain's own. */
-export function recipeOf(core: FrozenMaterial, optics: RunOptics, materials: FrozenMaterial[], porosity: number): OpticsRecipe {
+export function recipeOf(
+  core: FrozenMaterial,
+  optics: RunOptics,
+  materials: FrozenMaterial[],
+  porosity: number,
+): OpticsRecipe {
   const recipe: OpticsRecipe = { core: core.optics as Optics };
   if (porosity > 0) Object.assign(recipe, { porosity, mixing: optics.mixing ?? 'bruggeman' });
   if (!optics.mantle) return recipe;
@@ -23,7 +28,9 @@ export function recipeOf(core: FrozenMaterial, optics: RunOptics, materials: Fro
 
 /** SHA-256 over the ingredients and the engine version: equal keys mean equal bits. */
 export function curveKey(ingredients: CurveIngredients): string {
-  return createHash('sha256').update(JSON.stringify(sorted({ engine: ENGINE_VERSION, ...ingredients }))).digest('hex');
+  return createHash('sha256')
+    .update(JSON.stringify(sorted({ engine: ENGINE_VERSION, ...ingredients })))
+    .digest('hex');
 }
 
 /** The database gives back JSON with its keys in another order. */

@@ -18,7 +18,13 @@ export function constantEfficiencies(qpr: number, { luminositySun, distanceAu }:
   return { qpr: () => qpr, temperatureK: () => blackBodyK };
 }
 
-export function opticalNode(porosity: number, key: string, curve: Curve, emission: Emission, { luminositySun, distanceAu }: LightLevel): OpticalNode {
+export function opticalNode(
+  porosity: number,
+  key: string,
+  curve: Curve,
+  emission: Emission,
+  { luminositySun, distanceAu }: LightLevel,
+): OpticalNode {
   return { porosity, key, curve, temperatureK: temperatureCurve(curve, emission, luminositySun, distanceAu) };
 }
 
@@ -51,5 +57,9 @@ function fourNearest(nodes: OpticalNode[], porosity: number): OpticalNode[] {
 }
 
 function lagrangeWeight(near: OpticalNode[], node: OpticalNode, porosity: number): number {
-  return near.reduce((weight, other) => (other === node ? weight : (weight * (porosity - other.porosity)) / (node.porosity - other.porosity)), 1);
+  return near.reduce(
+    (weight, other) =>
+      other === node ? weight : (weight * (porosity - other.porosity)) / (node.porosity - other.porosity),
+    1,
+  );
 }

@@ -30,7 +30,13 @@ export async function executeRun(em: EntityManager, id: string): Promise<void> {
   }
 }
 
-async function computeAndStore(em: EntityManager, id: string, claim: string, shown: RunProgress, signal: AbortSignal): Promise<void> {
+async function computeAndStore(
+  em: EntityManager,
+  id: string,
+  claim: string,
+  shown: RunProgress,
+  signal: AbortSignal,
+): Promise<void> {
   const { inputs, catalogue } = await em.findOneOrFail(Run, { id, claim });
   const prepared = await prepareRun(em, catalogue.id, inputs, signal, (share, stage) => {
     Object.assign(shown, { progress: shareOfCurves * share, stage });
@@ -42,7 +48,16 @@ async function computeAndStore(em: EntityManager, id: string, claim: string, sho
     const changed = await tx.nativeUpdate(
       Run,
       { id, claim, status: 'running' },
-      { status: 'done', progress: 1, stage: 'Done', summary, histograms, resultSha256, claim: null, finishedAt: new Date() },
+      {
+        status: 'done',
+        progress: 1,
+        stage: 'Done',
+        summary,
+        histograms,
+        resultSha256,
+        claim: null,
+        finishedAt: new Date(),
+      },
     );
     if (changed === 0) throw new ClaimLost();
   });
@@ -70,12 +85,22 @@ async function* computed(
 }
 
 /** A surprise may pass (the database restarts): tried again by the sweeper, but not for ever. */
-async function giveUp(em: EntityManager, id: string, { claim, attempts }: { claim: string; attempts: number }): Promise<void> {
+async function giveUp(
+  em: EntityManager,
+  id: string,
+  { claim, attempts }: { claim: string; attempts: number },
+): Promise<void> {
   const mine = { id, claim, status: 'running' } as const;
   if (attempts < mostAttempts) {
-    await em.nativeUpdate(Run, mine, { status: 'queued', claim: null, stage: 'Waiting to be tried again', heartbeatAt: new Date() });
+    await em.nativeUpdate(Run, mine, {
+      status: 'queued',
+      claim: null,
+      stage: 'Waiting to be tried again',
+      heartbeatAt: new Date(),
+    });
     return;
   }
-  const error = 'The computation ended unexpectedly on our side, several times. Tell the administrator; the inputs are kept.';
+  const error =
+    'The computation ended unexpectedly on our side, several times. Tell the administrator; the inputs are kept.';
   await em.nativeUpdate(Run, mine, { status: 'failed', claim: null, stage: 'Failed', error, finishedAt: new Date() });
 }

@@ -30,7 +30,11 @@ const fields = Object.keys(columns) as (keyof RunGrainItem)[];
 const rowsAtOnce = 2000;
 
 /** All grains of a run as CSV, piece by piece. */
-export async function exportRun(em: EntityManager, actor: Actor, id: string): Promise<{ name: string; lines: AsyncGenerator<string> }> {
+export async function exportRun(
+  em: EntityManager,
+  actor: Actor,
+  id: string,
+): Promise<{ name: string; lines: AsyncGenerator<string> }> {
   const run = await finishedRun(em, actor, id);
   return { name: run.name, lines: csvOf(em, run.id, run.catalogue.id) };
 }

@@ -25,16 +25,27 @@ async function drawn(em: EntityManager, inputs: RunInputs, { material, name, mea
   const added = inputs.wind ? windFactors({ ...inputs.wind, qpr: 1, luminositySun }).pressureRatio : 0;
   const qpr = radiusSamplesUm.map((radiusUm) => qprOf(radiusUm * 1e-6));
   const grain = { densityKgM3: meanDensityGCm3 * 1000, massSun, luminositySun };
-  const beta = radiusSamplesUm.map((radiusUm, index) => betaOf({ ...grain, radiusM: radiusUm * 1e-6, qpr: qpr[index] + added }));
+  const beta = radiusSamplesUm.map((radiusUm, index) =>
+    betaOf({ ...grain, radiusM: radiusUm * 1e-6, qpr: qpr[index] + added }),
+  );
   return { material, name, densityGCm3: meanDensityGCm3, radiiUm: [...radiusSamplesUm], qpr, beta };
 }
 
-async function qprFunction(em: EntityManager, inputs: RunInputs, slug: string, meanDensityGCm3: number): Promise<(radiusM: number) => number> {
+async function qprFunction(
+  em: EntityManager,
+  inputs: RunInputs,
+  slug: string,
+  meanDensityGCm3: number,
+): Promise<(radiusM: number) => number> {
   const { optics, materials, star } = inputs;
   if (optics.model === 'constant') return () => optics.qpr ?? 1;
   const frozen = materials.find((material) => material.slug === slug);
   if (!frozen) throw new Error(`the material ${slug} is not among the run's inputs`);
-  const porosity = optics.porosity === 'fromDensity' ? porosityOf(meanDensityGCm3 * 1000, frozen.densityKgM3) : (optics.porosity ?? 0);
-  const curve = await recentCurve(em, { recipe: recipeOf(frozen, optics, materials, porosity), spectrum: spectrumOf(star) });
+  const porosity =
+    optics.porosity === 'fromDensity' ? porosityOf(meanDensityGCm3 * 1000, frozen.densityKgM3) : (optics.porosity ?? 0);
+  const curve = await recentCurve(em, {
+    recipe: recipeOf(frozen, optics, materials, porosity),
+    spectrum: spectrumOf(star),
+  });
   return (radiusM) => qprAt(curve, radiusM);
 }

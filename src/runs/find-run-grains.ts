@@ -14,7 +14,11 @@ export async function findRunGrains(em: EntityManager, actor: Actor, id: string,
     {
       from: runGrainFrom,
       select: runGrainSelect,
-      conditions: [{ sql: 'r.run_id = ? and g.catalogue_id = ?', values: [run.id, run.catalogue.id] }, ...grainConditions(query), ...fateConditions(query)],
+      conditions: [
+        { sql: 'r.run_id = ? and g.catalogue_id = ?', values: [run.id, run.catalogue.id] },
+        ...grainConditions(query),
+        ...fateConditions(query),
+      ],
       sortBy: runGrainSorts[sort],
       ordinal: 'r.ordinal',
       order,

@@ -1,14 +1,25 @@
 import type { EntityManager, Loaded } from '@mikro-orm/postgresql';
 import { Run } from '@/entities';
 import type { Actor } from '@/src/access/actor';
-import { defaultPageSize, newestFirst, newestFirstOrder, pageOfRows, type Page, type PageRequest } from '@/src/access/page';
+import {
+  defaultPageSize,
+  newestFirst,
+  newestFirstOrder,
+  pageOfRows,
+  type Page,
+  type PageRequest,
+} from '@/src/access/page';
 import { demand, ofOwnGroup } from '@/src/access/policy';
 import { notFound } from '@/src/errors';
 import type { RunItem } from './schema';
 
 type RunsWanted = PageRequest & { catalogueId?: string };
 
-export async function listRuns(em: EntityManager, actor: Actor, { limit = defaultPageSize, after, catalogueId }: RunsWanted = {}): Promise<Page<RunItem>> {
+export async function listRuns(
+  em: EntityManager,
+  actor: Actor,
+  { limit = defaultPageSize, after, catalogueId }: RunsWanted = {},
+): Promise<Page<RunItem>> {
   demand(actor, 'run.read');
   const rows = await em.find(
     Run,

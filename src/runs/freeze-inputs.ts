@@ -8,11 +8,19 @@ import { resolveStar } from '@/src/stars/resolve-star';
 import type { RunRequest } from './request-schema';
 
 /** All that a run depends on, by value: later changes of presets do not reach it. */
-export async function freezeInputs(em: EntityManager, groupId: string | null, catalogue: Catalogue, request: RunRequest): Promise<RunInputs> {
+export async function freezeInputs(
+  em: EntityManager,
+  groupId: string | null,
+  catalogue: Catalogue,
+  request: RunRequest,
+): Promise<RunInputs> {
   const star = await resolveStar(em, groupId, request);
   const current = await currentMaterials(em, groupId);
   const optics = canonicalOptics(request.optics, current);
-  const slugs = new Set([...catalogue.materials.map(({ material }) => material), ...(optics.mantle ? [optics.mantle.material] : [])]);
+  const slugs = new Set([
+    ...catalogue.materials.map(({ material }) => material),
+    ...(optics.mantle ? [optics.mantle.material] : []),
+  ]);
   return {
     catalogue: { id: catalogue.id, name: catalogue.name, sha256: catalogue.sha256, rows: catalogue.rowsAccepted },
     star,

@@ -13,10 +13,17 @@ export const resultNames = [
 ] as const;
 export type ResultName = (typeof resultNames)[number];
 
-export type GrainResults = Record<ResultName, Float64Array> & { length: number; isUnbound: Uint8Array; regime: Uint8Array };
+export type GrainResults = Record<ResultName, Float64Array> & {
+  length: number;
+  isUnbound: Uint8Array;
+  regime: Uint8Array;
+};
 
 export function emptyResults(length: number): GrainResults {
-  const columns = Object.fromEntries(resultNames.map((name) => [name, new Float64Array(length).fill(NaN)])) as Record<ResultName, Float64Array>;
+  const columns = Object.fromEntries(resultNames.map((name) => [name, new Float64Array(length).fill(NaN)])) as Record<
+    ResultName,
+    Float64Array
+  >;
   return { length, ...columns, isUnbound: new Uint8Array(length), regime: new Uint8Array(length) };
 }
 

@@ -30,10 +30,17 @@ export async function materialPopulations(em: EntityManager, catalogueId: string
 }
 
 /** The densities (kg/m3) that occur, or null when there are more than `most`. */
-export async function fewDensities(em: EntityManager, catalogueId: string, material: string, most: number): Promise<number[] | null> {
-  const found = await em.getConnection().execute<{ density: number }[]>(
-    `select distinct density_kg_m3 as density from grain where catalogue_id = ? and material = ? order by density limit ?`,
-    [catalogueId, material, most + 1],
-  );
+export async function fewDensities(
+  em: EntityManager,
+  catalogueId: string,
+  material: string,
+  most: number,
+): Promise<number[] | null> {
+  const found = await em
+    .getConnection()
+    .execute<{ density: number }[]>(
+      `select distinct density_kg_m3 as density from grain where catalogue_id = ? and material = ? order by density limit ?`,
+      [catalogueId, material, most + 1],
+    );
   return found.length > most ? null : found.map(({ density }) => density);
 }

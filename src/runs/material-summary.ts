@@ -3,7 +3,11 @@ import type { PreparedMaterial, PreparedRun } from './prepare-run';
 import { unboundAnswer } from './unbound-answer';
 
 /** What a run says of one material, for grains of its mean density. */
-export function materialSummary({ inputs }: PreparedRun, material: PreparedMaterial, unboundNumberShare: number): MaterialSummary {
+export function materialSummary(
+  { inputs }: PreparedRun,
+  material: PreparedMaterial,
+  unboundNumberShare: number,
+): MaterialSummary {
   const { frozen, population, nodes } = material;
   const densityKgM3 = population.meanDensityKgM3;
   const { massSun, luminositySun } = inputs.star;

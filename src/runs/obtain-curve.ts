@@ -8,7 +8,11 @@ import { curveInThread } from './curve-threads';
 export type ObtainedCurve = { key: string; curve: Curve };
 
 /** A curve that was paid for before, or a new one which is then kept. */
-export async function obtainCurve(em: EntityManager, ingredients: CurveIngredients, signal?: AbortSignal): Promise<ObtainedCurve> {
+export async function obtainCurve(
+  em: EntityManager,
+  ingredients: CurveIngredients,
+  signal?: AbortSignal,
+): Promise<ObtainedCurve> {
   const key = curveKey(ingredients);
   const kept = await keptCurve(em, key);
   if (kept) return { key, curve: kept };
@@ -18,7 +22,14 @@ export async function obtainCurve(em: EntityManager, ingredients: CurveIngredien
   // Two workers may build the same curve at once: they get the same bits, and one of them is kept.
   await em.upsert(
     KeptCurve,
-    { key, engineVersion: ENGINE_VERSION, encoded: Buffer.from(encoded), relativeErrorBound, shareOutsideValidRange, createdAt: new Date() },
+    {
+      key,
+      engineVersion: ENGINE_VERSION,
+      encoded: Buffer.from(encoded),
+      relativeErrorBound,
+      shareOutsideValidRange,
+      createdAt: new Date(),
+    },
     { onConflictAction: 'ignore' },
   );
   return { key, curve };

@@ -4,7 +4,15 @@ import { windFactors } from '@/src/physics/drag';
 import { prepareProbability } from '@/src/physics/probability';
 import { recipeOf, spectrumOf } from './curve-ingredients';
 import { emissionInThread } from './curve-threads';
-import { betweenNodes, constantEfficiencies, nodeEfficiencies, opticalNode, type Efficiencies, type LightLevel, type OpticalNode } from './efficiencies';
+import {
+  betweenNodes,
+  constantEfficiencies,
+  nodeEfficiencies,
+  opticalNode,
+  type Efficiencies,
+  type LightLevel,
+  type OpticalNode,
+} from './efficiencies';
 import { fewDensities, materialPopulations, type MaterialPopulation } from './material-population';
 import { obtainCurve } from './obtain-curve';
 import { evenPorosities, porosityOf } from './porosity-nodes';
@@ -35,7 +43,13 @@ const mostExactPorosities = 12;
 const porosityDigits = 4;
 
 /** Curves, emission and probabilities for every material of the catalogue: all that grains share. */
-export async function prepareRun(em: EntityManager, catalogueId: string, inputs: RunInputs, signal: AbortSignal, report: Report): Promise<PreparedRun> {
+export async function prepareRun(
+  em: EntityManager,
+  catalogueId: string,
+  inputs: RunInputs,
+  signal: AbortSignal,
+  report: Report,
+): Promise<PreparedRun> {
   const wind = preparedWind(inputs);
   const populations = await materialPopulations(em, catalogueId);
   const wanted = await Promise.all(populations.map((population) => porosities(em, catalogueId, inputs, population)));
@@ -68,16 +82,31 @@ function preparedWind({ wind, star }: RunInputs): PreparedWind {
   return { addedQpr: pressureRatio, dragRatioTimesQpr: dragRatio };
 }
 
-async function porosities(em: EntityManager, catalogueId: string, { optics, materials }: RunInputs, population: MaterialPopulation): Promise<number[]> {
+async function porosities(
+  em: EntityManager,
+  catalogueId: string,
+  { optics, materials }: RunInputs,
+  population: MaterialPopulation,
+): Promise<number[]> {
   if (optics.model === 'constant') return [];
   if (optics.porosity !== 'fromDensity') return [optics.porosity ?? 0];
-  const compact = materials.find(({ slug }) => slug === population.material)?.densityKgM3 ?? population.greatestDensityKgM3;
+  const compact =
+    materials.find(({ slug }) => slug === population.material)?.densityKgM3 ?? population.greatestDensityKgM3;
   const few = await fewDensities(em, catalogueId, population.material, mostExactPorosities);
   if (few) return [...new Set(few.map((density) => porosityOf(density, compact)))].sort((a, b) => a - b);
-  return evenPorosities(porosityOf(population.greatestDensityKgM3, compact), porosityOf(population.leastDensityKgM3, compact));
+  return evenPorosities(
+    porosityOf(population.greatestDensityKgM3, compact),
+    porosityOf(population.leastDensityKgM3, compact),
+  );
 }
 
-async function builtNode(em: EntityManager, inputs: RunInputs, frozen: FrozenMaterial, porosity: number, signal: AbortSignal): Promise<OpticalNode> {
+async function builtNode(
+  em: EntityManager,
+  inputs: RunInputs,
+  frozen: FrozenMaterial,
+  porosity: number,
+  signal: AbortSignal,
+): Promise<OpticalNode> {
   const recipe = recipeOf(frozen, inputs.optics, inputs.materials, porosity);
   const [{ key, curve }, emission] = await Promise.all([
     obtainCurve(em, { recipe, spectrum: spectrumOf(inputs.star) }, signal),
@@ -86,7 +115,12 @@ async function builtNode(em: EntityManager, inputs: RunInputs, frozen: FrozenMat
   return opticalNode(porosity, key, curve, emission, lightLevelOf(inputs));
 }
 
-function opticsByDensity(inputs: RunInputs, frozen: FrozenMaterial, nodes: OpticalNode[], wind: PreparedWind): (densityKgM3: number) => PreparedOptics {
+function opticsByDensity(
+  inputs: RunInputs,
+  frozen: FrozenMaterial,
+  nodes: OpticalNode[],
+  wind: PreparedWind,
+): (densityKgM3: number) => PreparedOptics {
   const prepared = new Map<string, PreparedOptics>();
   return (densityKgM3) => {
     const isFromDensity = inputs.optics.porosity === 'fromDensity';
@@ -102,16 +136,32 @@ function opticsByDensity(inputs: RunInputs, frozen: FrozenMaterial, nodes: Optic
   };
 }
 
-const lightLevelOf = ({ star, release }: RunInputs): LightLevel => ({ luminositySun: star.luminositySun, distanceAu: release.distanceAu });
+const lightLevelOf = ({ star, release }: RunInputs): LightLevel => ({
+  luminositySun: star.luminositySun,
+  distanceAu: release.distanceAu,
+});
 
-function efficienciesAt(inputs: RunInputs, nodes: OpticalNode[], exact: OpticalNode | undefined, porosity: number): Efficiencies {
+function efficienciesAt(
+  inputs: RunInputs,
+  nodes: OpticalNode[],
+  exact: OpticalNode | undefined,
+  porosity: number,
+): Efficiencies {
   const { optics } = inputs;
   if (optics.model === 'constant') return constantEfficiencies(optics.qpr ?? 1, lightLevelOf(inputs));
   return exact ? nodeEfficiencies(exact) : betweenNodes(nodes, porosity);
 }
 
-function withProbability({ star, betaCritical }: RunInputs, efficiencies: Efficiencies, { addedQpr }: PreparedWind): PreparedOptics {
+function withProbability(
+  { star, betaCritical }: RunInputs,
+  efficiencies: Efficiencies,
+  { addedQpr }: PreparedWind,
+): PreparedOptics {
   const effectiveQpr = (radiusM: number) => efficiencies.qpr(radiusM) + addedQpr;
   const { luminositySun, massSun } = star;
-  return { efficiencies, effectiveQpr, probability: prepareProbability(effectiveQpr, { luminositySun, massSun, betaCritical }) };
+  return {
+    efficiencies,
+    effectiveQpr,
+    probability: prepareProbability(effectiveQpr, { luminositySun, massSun, betaCritical }),
+  };
 }

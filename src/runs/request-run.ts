@@ -10,7 +10,11 @@ import { freezeInputs } from './freeze-inputs';
 import type { RunRequest } from './request-schema';
 
 /** Freezes every input by value and asks for the computation, both in one transaction. */
-export async function requestRun(em: EntityManager, actor: Actor, request: RunRequest): Promise<{ id: string; status: Run['status'] }> {
+export async function requestRun(
+  em: EntityManager,
+  actor: Actor,
+  request: RunRequest,
+): Promise<{ id: string; status: Run['status'] }> {
   demand(actor, 'run.request');
   return em.transactional(async (tx) => {
     const catalogue = await readyCatalogue(tx, actor, request.catalogueId);
@@ -34,7 +38,10 @@ export async function requestRun(em: EntityManager, actor: Actor, request: RunRe
 async function readyCatalogue(em: EntityManager, actor: Actor, id: string): Promise<Catalogue> {
   const pointer = '/catalogueId';
   const catalogue = await em.findOne(Catalogue, { id, ...ofOwnGroup(actor) });
-  if (!catalogue) throw new Refusal('notFound', 'There is no such catalogue.', [{ pointer, detail: 'is not a catalogue of your group' }]);
+  if (!catalogue)
+    throw new Refusal('notFound', 'There is no such catalogue.', [
+      { pointer, detail: 'is not a catalogue of your group' },
+    ]);
   if (catalogue.status === 'ready') return catalogue;
   const detail = catalogue.status === 'checking' ? 'is still being checked' : 'could not be read';
   throw new Refusal('conflict', `The catalogue "${catalogue.name}" ${detail}.`, [{ pointer, detail }]);

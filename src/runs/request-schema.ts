@@ -19,12 +19,20 @@ export const releaseInput = z
 export const opticsInput = z
   .strictObject({
     model: z.enum(['mie', 'constant']),
-    qpr: z.number().positive().max(10).optional().describe('Radiation-pressure efficiency; needed when the model is constant'),
+    qpr: z
+      .number()
+      .positive()
+      .max(10)
+      .optional()
+      .describe('Radiation-pressure efficiency; needed when the model is constant'),
     porosity: z
       .union([z.number().min(0).max(0.99), z.literal('fromDensity')])
       .optional()
       .describe('Share of vacuum in the grain, or fromDensity: 1 - bulk density / material density of each grain'),
-    mixing: z.enum(['bruggeman', 'maxwellGarnett']).optional().describe('Mixing rule for porous grains, bruggeman when left out'),
+    mixing: z
+      .enum(['bruggeman', 'maxwellGarnett'])
+      .optional()
+      .describe('Mixing rule for porous grains, bruggeman when left out'),
     mantle: z
       .strictObject({ material: slugOrAlias, volumeFraction: z.number().gt(0).lt(1) })
       .optional()
@@ -86,7 +94,12 @@ export const curveRequest = z
     densityGCm3: z.number().positive().max(25).optional().describe("The material's own when left out"),
     betaCritical: z.number().positive().max(10).optional().describe('0.5 when left out'),
     optics: opticsInput.optional(),
-    radiiUm: z.array(z.number().min(1e-3).max(1e4)).min(1).max(2000).optional().describe('A grid of the whole range when left out'),
+    radiiUm: z
+      .array(z.number().min(1e-3).max(1e4))
+      .min(1)
+      .max(2000)
+      .optional()
+      .describe('A grid of the whole range when left out'),
   })
   .refine(exactlyOneStar, { path: ['starSlug'], message: 'give exactly one of starId, starSlug and star' })
   .refine((value) => (value.materialId === undefined) !== (value.slug === undefined), {

@@ -49,7 +49,13 @@ export class RunTally {
       const area = count * Math.PI * radiusM * radiusM;
       const weights: Shares = { number: count, area, mass: count * sphere * radiusM ** 3 * densityKgM3 };
       const unbound = results.isUnbound[row] === 1;
-      const geometricBeta = betaOf({ qpr: 1, radiusM, densityKgM3, massSun: star.massSun, luminositySun: star.luminositySun });
+      const geometricBeta = betaOf({
+        qpr: 1,
+        radiusM,
+        densityKgM3,
+        massSun: star.massSun,
+        luminositySun: star.luminositySun,
+      });
       const bin = this.binOf(radiusM);
       for (const by of weightings) {
         this.total[by] += weights[by];

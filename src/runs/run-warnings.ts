@@ -5,7 +5,10 @@ const fewRows = 20;
 const bulkOpticsFromM = 5e-9;
 
 /** What a reader of the answer should know, in sentences. */
-export function runWarnings({ inputs, materials }: PreparedRun, { rows, effectiveRows }: { rows: number; effectiveRows: number }): string[] {
+export function runWarnings(
+  { inputs, materials }: PreparedRun,
+  { rows, effectiveRows }: { rows: number; effectiveRows: number },
+): string[] {
   const warnings: string[] = [];
   const all = [...materials.values()];
   for (const { frozen, nodes } of all) {
@@ -17,7 +20,9 @@ export function runWarnings({ inputs, materials }: PreparedRun, { rows, effectiv
   }
   if (effectiveRows < fewRows && rows > 0) {
     const carried = effectiveRows.toFixed(1);
-    warnings.push(`The shares rest on few grains: weighted with the counts, the catalogue is worth ${carried} independent rows.`);
+    warnings.push(
+      `The shares rest on few grains: weighted with the counts, the catalogue is worth ${carried} independent rows.`,
+    );
   }
   return warnings;
 }
@@ -26,10 +31,14 @@ function porosityWarnings({ frozen, population }: PreparedMaterial): string[] {
   const warnings: string[] = [];
   const gramsPerCm3 = (frozen.densityKgM3 / 1000).toPrecision(4);
   if (population.greatestDensityKgM3 > frozen.densityKgM3) {
-    warnings.push(`${frozen.name}: grains denser than the compact material (${gramsPerCm3} g/cm3) are treated as compact.`);
+    warnings.push(
+      `${frozen.name}: grains denser than the compact material (${gramsPerCm3} g/cm3) are treated as compact.`,
+    );
   }
   if (population.leastDensityKgM3 < (1 - greatestPorosity) * frozen.densityKgM3) {
-    warnings.push(`${frozen.name}: grains with more than ${100 * greatestPorosity} % vacuum are treated as having ${100 * greatestPorosity} %.`);
+    warnings.push(
+      `${frozen.name}: grains with more than ${100 * greatestPorosity} % vacuum are treated as having ${100 * greatestPorosity} %.`,
+    );
   }
   return warnings;
 }

@@ -114,7 +114,14 @@ export type CurveAnswer = z.infer<typeof curveAnswer>;
 export const runCurves = z.object({
   betaCritical: finite,
   curves: z.array(
-    z.object({ material: z.string(), name: z.string(), densityGCm3: finite, radiiUm: z.array(finite), qpr: z.array(finite), beta: z.array(finite) }),
+    z.object({
+      material: z.string(),
+      name: z.string(),
+      densityGCm3: finite,
+      radiiUm: z.array(finite),
+      qpr: z.array(finite),
+      beta: z.array(finite),
+    }),
   ),
 });
 export type RunCurves = z.infer<typeof runCurves>;

@@ -13,13 +13,23 @@ export type UnboundAnswer = {
 };
 
 /** Below which radii grains of one density are unbound: all crossings of beta(s) with the critical value. */
-export function unboundAnswer(effectiveQpr: (radiusM: number) => number, isConstant: boolean, grain: Grain, betaCritical: number): UnboundAnswer {
+export function unboundAnswer(
+  effectiveQpr: (radiusM: number) => number,
+  isConstant: boolean,
+  grain: Grain,
+  betaCritical: number,
+): UnboundAnswer {
   const betaAt = (radiusM: number) => betaOf({ ...grain, radiusM, qpr: effectiveQpr(radiusM) });
   const geometricBlowoutRadiusUm = (betaOf({ ...grain, radiusM: 1, qpr: 1 }) / betaCritical) * 1e6;
   if (isConstant) {
     // beta falls as 1/s at all radii: one crossing, in closed form, and no largest value above the smallest radius.
     const crossingUm = (betaAt(1) / betaCritical) * 1e6;
-    return { betaMax: betaAt(CURVE_RADIUS_MIN_M), radiusAtBetaMaxUm: micrometres(CURVE_RADIUS_MIN_M), unboundIntervalsUm: [[0, crossingUm]], geometricBlowoutRadiusUm };
+    return {
+      betaMax: betaAt(CURVE_RADIUS_MIN_M),
+      radiusAtBetaMaxUm: micrometres(CURVE_RADIUS_MIN_M),
+      unboundIntervalsUm: [[0, crossingUm]],
+      geometricBlowoutRadiusUm,
+    };
   }
   const { intervalsM, betaMax, radiusAtBetaMaxM } = unboundIntervals(betaAt, betaCritical);
   return {

@@ -46,7 +46,9 @@ function headline({ unbound }: RunSummary, star: string): AnswerPart[] {
 }
 
 /** "Water ice: never; beta peaks at 0.431 at 0.210 µm." or "Amorphous carbon below 1.21 µm." */
-export function materialSentence(material: Pick<MaterialSummary, 'name' | 'unboundIntervalsUm' | 'betaMax' | 'radiusAtBetaMaxUm'>): string {
+export function materialSentence(
+  material: Pick<MaterialSummary, 'name' | 'unboundIntervalsUm' | 'betaMax' | 'radiusAtBetaMaxUm'>,
+): string {
   const { name, unboundIntervalsUm, betaMax, radiusAtBetaMaxUm } = material;
   if (unboundIntervalsUm.length === 0) {
     return `${name}: never; beta peaks at ${trimmed(betaMax)} at ${radiusText(radiusAtBetaMaxUm)}.`;
@@ -80,14 +82,19 @@ function notes({ unbound, perMaterial, betaCritical }: RunSummary): string[] {
     `The radii hold for the mean density of each material (${perMaterial.map(densityOf).join('; ')}); each grain is judged at its own density.`,
   ];
   if (Math.abs(unbound.expectedNumberShare - unbound.numberShare) > tellingDifference) {
-    told.push(`With the quoted errors of size and density the expected share by number is ${percentText(unbound.expectedNumberShare)}.`);
+    told.push(
+      `With the quoted errors of size and density the expected share by number is ${percentText(unbound.expectedNumberShare)}.`,
+    );
   }
   if (unbound.repelled > 0) {
-    told.push(`${grainCount(unbound.repelled)} with beta of 1 or more: light outweighs gravity and pushes such grains away on any path.`);
+    told.push(
+      `${grainCount(unbound.repelled)} with beta of 1 or more: light outweighs gravity and pushes such grains away on any path.`,
+    );
   }
   return told;
 }
 
 const densityOf = ({ name, meanDensityGCm3 }: MaterialSummary) => `${name} ${trimmed(meanDensityGCm3)} g/cm³`;
 
-const grainCount = (count: number) => `${count.toLocaleString('en-US', { maximumFractionDigits: 1 })} grain${count === 1 ? '' : 's'}`;
+const grainCount = (count: number) =>
+  `${count.toLocaleString('en-US', { maximumFractionDigits: 1 })} grain${count === 1 ? '' : 's'}`;

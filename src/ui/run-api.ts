@@ -17,7 +17,8 @@ export function apiGet<T>(path: string, signal?: AbortSignal): Promise<T> {
 }
 
 export function apiPost<T>(path: string, body?: unknown, signal?: AbortSignal): Promise<T> {
-  const sent = body === undefined ? {} : { headers: { 'content-type': 'application/json' }, body: JSON.stringify(body) };
+  const sent =
+    body === undefined ? {} : { headers: { 'content-type': 'application/json' }, body: JSON.stringify(body) };
   return answer<T>(fetch(path, { method: 'POST', signal, ...sent }));
 }
 
@@ -29,14 +30,17 @@ async function answer<T>(asked: Promise<Response>): Promise<T> {
 
 async function problemOf(response: Response): Promise<ApiProblem> {
   const isProblem = response.headers.get('content-type')?.includes('application/problem+json');
-  if (!isProblem) return new ApiProblem(response.status, 'The server did not answer as expected. Try again in a moment.');
+  if (!isProblem)
+    return new ApiProblem(response.status, 'The server did not answer as expected. Try again in a moment.');
   const { detail, errors } = (await response.json()) as { detail: string; errors?: ApiFieldProblem[] };
   return new ApiProblem(response.status, detail, errors);
 }
 
 /** One sentence for the person, also when the network itself failed. */
 export function sayProblem(error: unknown): string {
-  return error instanceof ApiProblem ? error.message : 'The server could not be reached. Check the connection and try again.';
+  return error instanceof ApiProblem
+    ? error.message
+    : 'The server could not be reached. Check the connection and try again.';
 }
 
 /** Asking again helps against a broken connection or a busy server, not against a refusal. */

@@ -29,19 +29,33 @@ function outsideMeasurements({ perMaterial }: RunSummary): string[] {
     );
 }
 
-function chargedGrains({ perMaterial }: RunSummary, { charging }: RunInputs, smallestRadiusUm: number | null): string[] {
+function chargedGrains(
+  { perMaterial }: RunSummary,
+  { charging }: RunInputs,
+  smallestRadiusUm: number | null,
+): string[] {
   const hasSmall = smallestRadiusUm === null || smallestRadiusUm < chargedBelowUm;
   if (!hasSmall) return [];
-  const windows = perMaterial.filter(({ unboundIntervalsUm }) => unboundIntervalsUm.some(([low]) => low > 0 && low < chargedBelowUm));
-  const lowerEnds = windows.map(({ name, unboundIntervalsUm }) => `${name} ${intervalsInWords(unboundIntervalsUm)}`).join('; ');
+  const windows = perMaterial.filter(({ unboundIntervalsUm }) =>
+    unboundIntervalsUm.some(([low]) => low > 0 && low < chargedBelowUm),
+  );
+  const lowerEnds = windows
+    .map(({ name, unboundIntervalsUm }) => `${name} ${intervalsInWords(unboundIntervalsUm)}`)
+    .join('; ');
   const about = lowerEnds ? ` This bears on the lower ends of the windows (${lowerEnds}).` : '';
-  const seen = charging ? 'The column "Lorentz / gravity" says how strong the force is for each grain.' : 'Turn on charging to see how strong the force is.';
-  return [`Grains below about 0.1 µm are charged, and near a star like the Sun the magnetic force rules their motion: their fate from beta alone is only indicative.${about} ${seen}`];
+  const seen = charging
+    ? 'The column "Lorentz / gravity" says how strong the force is for each grain.'
+    : 'Turn on charging to see how strong the force is.';
+  return [
+    `Grains below about 0.1 µm are charged, and near a star like the Sun the magnetic force rules their motion: their fate from beta alone is only indicative.${about} ${seen}`,
+  ];
 }
 
 function tinyGrains(smallestRadiusUm: number | null): string[] {
   if (smallestRadiusUm === null || smallestRadiusUm >= bulkOpticsBelowUm) return [];
-  return [`The smallest grain has a radius of ${trimmed(smallestRadiusUm * 1000)} nm. Below 5 nm optical constants of bulk matter no longer describe a grain.`];
+  return [
+    `The smallest grain has a radius of ${trimmed(smallestRadiusUm * 1000)} nm. Below 5 nm optical constants of bulk matter no longer describe a grain.`,
+  ];
 }
 
 function transparent({ perMaterial }: RunSummary): string[] {

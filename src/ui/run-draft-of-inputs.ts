@@ -20,7 +20,12 @@ export function draftOfInputs(inputs: RunInputs, name: string): RunDraft {
     model: optics.model,
     qpr: String(optics.qpr ?? emptyDraft.qpr),
     ...structureOf(optics),
-    ...(wind && { hasWind: true, massLossSunPerYr: String(wind.massLossSunPerYr), windSpeedKmS: String(wind.speedKmS), qsw: String(wind.qsw) }),
+    ...(wind && {
+      hasWind: true,
+      massLossSunPerYr: String(wind.massLossSunPerYr),
+      windSpeedKmS: String(wind.speedKmS),
+      qsw: String(wind.qsw),
+    }),
     ...(disc && { hasDisc: true, opticalDepth: String(disc.opticalDepth) }),
     ...(charging && { hasCharging: true, potentialV: String(charging.potentialV), fieldNT: String(charging.fieldNT) }),
   };
@@ -30,7 +35,8 @@ const textOf = (value: number | undefined) => (value === undefined ? '' : String
 
 function structureOf({ porosity, mixing, mantle }: RunInputs['optics']): Partial<RunDraft> {
   const how = mixing ? { mixing } : {};
-  if (mantle) return { structure: 'coated', mantleMaterial: mantle.material, mantleFraction: String(mantle.volumeFraction) };
+  if (mantle)
+    return { structure: 'coated', mantleMaterial: mantle.material, mantleFraction: String(mantle.volumeFraction) };
   if (porosity === 'fromDensity') return { structure: 'fromDensity', ...how };
   return porosity ? { structure: 'porous', porosity: String(porosity), ...how } : {};
 }

@@ -9,7 +9,10 @@ export function RunFailed({ run }: { run: RunItem }) {
     <Ended run={run}>
       <Notice kind="danger" title="This run failed">
         <p>{run.error}</p>
-        <p className="mt-1">Nothing was stored. Change the inputs and run it again; if it fails for the same reason, tell your administrator the run number {run.id}.</p>
+        <p className="mt-1">
+          Nothing was stored. Change the inputs and run it again; if it fails for the same reason, tell your
+          administrator the run number {run.id}.
+        </p>
       </Notice>
     </Ended>
   );

@@ -30,10 +30,24 @@ export function trimmed(value: number, digits = 3): string {
 
 /** A number that somebody chose, without zeros that nobody wrote. */
 export function exactText(value: number, digits = 6): string {
-  return trimmed(value, digits).replace(/(\.\d*?)0+(?=$| )/, '$1').replace(/\.(?=$| )/, '');
+  return trimmed(value, digits)
+    .replace(/(\.\d*?)0+(?=$| )/, '$1')
+    .replace(/\.(?=$| )/, '');
 }
 
-const raised: Record<string, string> = { '-': '⁻', '0': '⁰', '1': '¹', '2': '²', '3': '³', '4': '⁴', '5': '⁵', '6': '⁶', '7': '⁷', '8': '⁸', '9': '⁹' };
+const raised: Record<string, string> = {
+  '-': '⁻',
+  '0': '⁰',
+  '1': '¹',
+  '2': '²',
+  '3': '³',
+  '4': '⁴',
+  '5': '⁵',
+  '6': '⁶',
+  '7': '⁷',
+  '8': '⁸',
+  '9': '⁹',
+};
 
 function powerOfTen(value: number, digits: number): string {
   const [mantissa, exponent] = value.toExponential(digits - 1).split('e');

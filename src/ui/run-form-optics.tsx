@@ -12,10 +12,21 @@ const models = [
 export function RunFormOptics({ draft, problems, onChange }: FormPartProps) {
   return (
     <FormPart title="Optics">
-      <RunChoiceField legend="How grains take up light" value={draft.model} onChange={(model) => onChange({ model })} choices={models} />
+      <RunChoiceField
+        legend="How grains take up light"
+        value={draft.model}
+        onChange={(model) => onChange({ model })}
+        choices={models}
+      />
       {draft.model === 'constant' && (
         <div className="max-w-48">
-          <RunTextField label="Q_pr" value={draft.qpr} onChange={(qpr) => onChange({ qpr })} problem={problems['optics.qpr']} hint="1 is the geometric limit." />
+          <RunTextField
+            label="Q_pr"
+            value={draft.qpr}
+            onChange={(qpr) => onChange({ qpr })}
+            problem={problems['optics.qpr']}
+            hint="1 is the geometric limit."
+          />
         </div>
       )}
     </FormPart>

@@ -6,7 +6,12 @@ import { FormPart, type FormPartProps } from './run-form-part';
 import { RunSelectField } from './run-select-field';
 import { RunTextField } from './run-text-field';
 
-export function RunFormPopulation({ draft, problems, onChange, catalogues }: FormPartProps & { catalogues: readonly CatalogueItem[] }) {
+export function RunFormPopulation({
+  draft,
+  problems,
+  onChange,
+  catalogues,
+}: FormPartProps & { catalogues: readonly CatalogueItem[] }) {
   const ready = catalogues.filter(({ status }) => status === 'ready');
   return (
     <FormPart title="Grains">
@@ -17,7 +22,10 @@ export function RunFormPopulation({ draft, problems, onChange, catalogues }: For
           onChange={(catalogueId) => onChange({ catalogueId })}
           problem={problems.catalogueId}
           empty="Choose a catalogue"
-          choices={ready.map(({ id, name, rows }) => ({ value: id, label: `${name} (${rows.accepted.toLocaleString('en-US')} grains)` }))}
+          choices={ready.map(({ id, name, rows }) => ({
+            value: id,
+            label: `${name} (${rows.accepted.toLocaleString('en-US')} grains)`,
+          }))}
           hint={
             <>
               Not in the list?{' '}
@@ -27,7 +35,14 @@ export function RunFormPopulation({ draft, problems, onChange, catalogues }: For
             </>
           }
         />
-        <RunTextField label="Name of the run" value={draft.name} onChange={(name) => onChange({ name })} problem={problems.name} isNumber={false} hint="May stay empty: catalogue and star then name it." />
+        <RunTextField
+          label="Name of the run"
+          value={draft.name}
+          onChange={(name) => onChange({ name })}
+          problem={problems.name}
+          isNumber={false}
+          hint="May stay empty: catalogue and star then name it."
+        />
       </div>
     </FormPart>
   );

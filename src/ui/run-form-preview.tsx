@@ -11,13 +11,24 @@ import { rangeAround } from './plots/radius-range';
 import { materialSentence } from './run-answer';
 import { apiPost, sayProblem, worthAskingAgain } from './run-api';
 
-type Props = { request: RunRequest; betaCritical: number; catalogue: CatalogueItem; materials: readonly MaterialItem[] };
+type Props = {
+  request: RunRequest;
+  betaCritical: number;
+  catalogue: CatalogueItem;
+  materials: readonly MaterialItem[];
+};
 
 /** The answer in outline, before anything is stored: each material of the catalogue at its own density. */
 export function RunFormPreview({ request, betaCritical, catalogue, materials }: Props) {
   const slugs = catalogue.materials.map(({ material }) => material);
-  const combine = useCallback((results: UseQueryResult<CurveAnswer>[]) => combined(results, catalogue, materials), [catalogue, materials]);
-  const { curves, problem, isBusy } = useQueries({ queries: slugs.map((slug) => curveQuery(request, slug, betaCritical)), combine });
+  const combine = useCallback(
+    (results: UseQueryResult<CurveAnswer>[]) => combined(results, catalogue, materials),
+    [catalogue, materials],
+  );
+  const { curves, problem, isBusy } = useQueries({
+    queries: slugs.map((slug) => curveQuery(request, slug, betaCritical)),
+    combine,
+  });
   const rangeUm = useMemo(() => rangeAround(curves.flatMap(radiiToSee)), [curves]);
   return (
     <div className="grid gap-3">
@@ -49,8 +60,14 @@ export function RunFormPreview({ request, betaCritical, catalogue, materials }: 
 }
 
 /** The query client keeps this the same object while the answers stay the same, so the plot is drawn only when they change. */
-function combined(results: UseQueryResult<CurveAnswer>[], catalogue: CatalogueItem, materials: readonly MaterialItem[]) {
-  const names = catalogue.materials.map(({ material }) => materials.find(({ slug }) => slug === material)?.name ?? material);
+function combined(
+  results: UseQueryResult<CurveAnswer>[],
+  catalogue: CatalogueItem,
+  materials: readonly MaterialItem[],
+) {
+  const names = catalogue.materials.map(
+    ({ material }) => materials.find(({ slug }) => slug === material)?.name ?? material,
+  );
   return {
     curves: results.flatMap(({ data }, index) => (data ? [{ name: names[index], ...data }] : [])),
     problem: results.find(({ error }) => error)?.error,
@@ -59,7 +76,14 @@ function combined(results: UseQueryResult<CurveAnswer>[], catalogue: CatalogueIt
 }
 
 function curveQuery(request: RunRequest, slug: string, betaCritical: number) {
-  const body = { slug, starSlug: request.starSlug, starId: request.starId, star: request.star, betaCritical, optics: request.optics };
+  const body = {
+    slug,
+    starSlug: request.starSlug,
+    starId: request.starId,
+    star: request.star,
+    betaCritical,
+    optics: request.optics,
+  };
   return {
     queryKey: ['curve', body],
     queryFn: ({ signal }: { signal: AbortSignal }) => apiPost<CurveAnswer>('/api/v1/curves', body, signal),

@@ -40,13 +40,19 @@ export function RunFormRelease({ draft, problems, onChange }: FormPartProps) {
           />
         )}
       </div>
-      <RunChoiceField legend="Where on the orbit" value={draft.at} onChange={(at) => onChange({ at })} choices={places} />
+      <RunChoiceField
+        legend="Where on the orbit"
+        value={draft.at}
+        onChange={(at) => onChange({ at })}
+        choices={places}
+      />
       <p className="border-chaff bg-chaff/10 border-l-4 px-4 py-2" role="status">
         {critical === null ? (
           'The critical beta follows from eccentricity and place.'
         ) : (
           <>
-            Grains with beta of <strong className="font-mono tabular-nums">{exactText(critical, 4)}</strong> or more leave.
+            Grains with beta of <strong className="font-mono tabular-nums">{exactText(critical, 4)}</strong> or more
+            leave.
           </>
         )}
       </p>

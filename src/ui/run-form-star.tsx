@@ -28,7 +28,10 @@ export function RunFormStar({ draft, problems, onChange, stars }: FormPartProps 
 }
 
 export const starChoices = (stars: readonly StarItem[]) => [
-  ...stars.map(({ slug, name, spectralType }) => ({ value: slug, label: spectralType ? `${name} (${spectralType})` : name })),
+  ...stars.map(({ slug, name, spectralType }) => ({
+    value: slug,
+    label: spectralType ? `${name} (${spectralType})` : name,
+  })),
   { value: ownStar, label: 'Own numbers' },
 ];
 

@@ -18,17 +18,40 @@ const mixingRules = [
   { value: 'maxwellGarnett', label: 'Maxwell Garnett' },
 ] as const;
 
-export function RunFormStructure({ draft, problems, onChange, materials }: FormPartProps & { materials: readonly MaterialItem[] }) {
+export function RunFormStructure({
+  draft,
+  problems,
+  onChange,
+  materials,
+}: FormPartProps & { materials: readonly MaterialItem[] }) {
   const isPorous = draft.structure === 'porous' || draft.structure === 'fromDensity';
   return (
     <div className="grid gap-4">
-      <RunChoiceField legend="Structure of the grains" value={draft.structure} onChange={(structure) => onChange({ structure })} choices={structures} />
+      <RunChoiceField
+        legend="Structure of the grains"
+        value={draft.structure}
+        onChange={(structure) => onChange({ structure })}
+        choices={structures}
+      />
       {draft.structure === 'porous' && (
         <div className="max-w-48">
-          <RunTextField label="Porosity" value={draft.porosity} onChange={(porosity) => onChange({ porosity })} problem={problems['optics.porosity']} hint="Share of vacuum, 0 to 0.99" />
+          <RunTextField
+            label="Porosity"
+            value={draft.porosity}
+            onChange={(porosity) => onChange({ porosity })}
+            problem={problems['optics.porosity']}
+            hint="Share of vacuum, 0 to 0.99"
+          />
         </div>
       )}
-      {isPorous && <RunChoiceField legend="Mixing rule" value={draft.mixing} onChange={(mixing) => onChange({ mixing })} choices={mixingRules} />}
+      {isPorous && (
+        <RunChoiceField
+          legend="Mixing rule"
+          value={draft.mixing}
+          onChange={(mixing) => onChange({ mixing })}
+          choices={mixingRules}
+        />
+      )}
       {draft.structure === 'coated' && (
         <div className="grid gap-4 sm:grid-cols-2">
           <RunSelectField

@@ -58,7 +58,9 @@ export function RunForm({ action, initial, catalogues, stars, materials }: Props
         <RunFormAdvanced {...part} materials={materials} />
         <div className="grid gap-3" aria-live="polite">
           {state.message && <Notice kind="danger">{state.message}</Notice>}
-          {tried && problems && <Notice kind="danger">{`${Object.keys(problems).length} thing(s) to set right above before the run can start.`}</Notice>}
+          {tried && problems && (
+            <Notice kind="danger">{`${Object.keys(problems).length} thing(s) to set right above before the run can start.`}</Notice>
+          )}
         </div>
         <div>
           <Button type="submit" variant="primary" disabled={isSending}>
@@ -66,14 +68,24 @@ export function RunForm({ action, initial, catalogues, stars, materials }: Props
           </Button>
         </div>
       </form>
-      <aside className="border-line bg-panel min-w-0 rounded-lg border p-5 lg:sticky lg:top-6" aria-labelledby="preview">
+      <aside
+        className="border-line bg-panel min-w-0 rounded-lg border p-5 lg:sticky lg:top-6"
+        aria-labelledby="preview"
+      >
         <h2 id="preview" className="mb-3 font-serif text-xl">
           What to expect
         </h2>
         {settled.request && catalogue && settled.betaCritical !== null ? (
-          <RunFormPreview request={settled.request} betaCritical={settled.betaCritical} catalogue={catalogue} materials={materials} />
+          <RunFormPreview
+            request={settled.request}
+            betaCritical={settled.betaCritical}
+            catalogue={catalogue}
+            materials={materials}
+          />
         ) : (
-          <p className="text-muted">Choose a catalogue and a star: the radii that go unbound appear here before you start.</p>
+          <p className="text-muted">
+            Choose a catalogue and a star: the radii that go unbound appear here before you start.
+          </p>
         )}
       </aside>
     </div>

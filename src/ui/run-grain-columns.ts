@@ -20,12 +20,23 @@ export function runGrainColumns(summary: RunSummary, inputs: RunInputs): GridCol
     { field: 'qpr', header: 'Q_pr', kind: 'number', widthPx: 100 },
     { field: 'regime', header: 'Fastest process', kind: 'choice', words: regimes, widthPx: 150 },
     { field: 'prTimeYr', header: 'Drag time', unit: 'yr', kind: 'number', widthPx: 140 },
-    inputs.disc !== undefined && { field: 'collisionTimeYr', header: 'Collision time', unit: 'yr', kind: 'number', widthPx: 160 },
+    inputs.disc !== undefined && {
+      field: 'collisionTimeYr',
+      header: 'Collision time',
+      unit: 'yr',
+      kind: 'number',
+      widthPx: 160,
+    },
     { field: 'semiMajorAxisAu', header: 'New semi-major axis', unit: 'au', kind: 'number', widthPx: 200 },
     { field: 'eccentricity', header: 'New eccentricity', kind: 'number', widthPx: 160 },
     { field: 'vInfKmS', header: 'Speed far away', unit: 'km/s', kind: 'number', widthPx: 180 },
     { field: 'temperatureK', header: 'Temperature', unit: 'K', kind: 'number', widthPx: 150 },
-    inputs.charging !== undefined && { field: 'lorentzRatio', header: 'Lorentz / gravity', kind: 'number', widthPx: 160 },
+    inputs.charging !== undefined && {
+      field: 'lorentzRatio',
+      header: 'Lorentz / gravity',
+      kind: 'number',
+      widthPx: 160,
+    },
   ];
   return columns.filter((column) => column !== false);
 }
@@ -40,6 +51,8 @@ export function runGrainFilters(summary: RunSummary): GridFilter[] {
   ];
 }
 
-const materialNames = ({ perMaterial }: RunSummary) => Object.fromEntries(perMaterial.map(({ material, name }) => [material, name]));
+const materialNames = ({ perMaterial }: RunSummary) =>
+  Object.fromEntries(perMaterial.map(({ material, name }) => [material, name]));
 
-const choicesOf = (words: Readonly<Record<string, string>>) => Object.entries(words).map(([value, label]) => ({ value, label }));
+const choicesOf = (words: Readonly<Record<string, string>>) =>
+  Object.entries(words).map(([value, label]) => ({ value, label }));

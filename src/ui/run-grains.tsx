@@ -15,9 +15,16 @@ export function RunGrains({ run, summary }: { run: RunItem; summary: RunSummary 
   const filters = useMemo(() => runGrainFilters(summary), [summary]);
   return (
     <RunSection id="grains" title="Grains">
-      <ServerGrid endpoint={`/api/v1/runs/${run.id}/grains`} columns={columns} filters={filters} initialSort={highestBetaFirst} label="Grains of this run" />
+      <ServerGrid
+        endpoint={`/api/v1/runs/${run.id}/grains`}
+        columns={columns}
+        filters={filters}
+        initialSort={highestBetaFirst}
+        label="Grains of this run"
+      />
       <p className="text-muted mt-2 text-sm">
-        A dash means that the quantity does not exist: an unbound grain has no new orbit and no drag time, a bound grain has no speed far away.
+        A dash means that the quantity does not exist: an unbound grain has no new orbit and no drag time, a bound grain
+        has no speed far away.
       </p>
     </RunSection>
   );

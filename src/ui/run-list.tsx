@@ -12,10 +12,17 @@ type RunPage = { items: RunItem[]; next: string | null };
 const askEveryMs = 2000;
 const columns = ['Run', 'Catalogue', 'Star', 'Status', 'Unbound, by number', 'Requested', 'By'];
 
-export function RunList({ initial, after }: { initial: RunPage; after?: string }) {
-  const path = `/api/v1/runs?limit=50${after ? `&after=${encodeURIComponent(after)}` : ''}`;
+type Props = { initial: RunPage; after?: string; catalogueId?: string; limit?: number };
+
+export function RunList({ initial, after, catalogueId, limit = 50 }: Props) {
+  const query = new URLSearchParams({
+    limit: String(limit),
+    ...(after ? { after } : {}),
+    ...(catalogueId ? { catalogueId } : {}),
+  });
+  const path = `/api/v1/runs?${query}`;
   const { data } = useQuery({
-    queryKey: ['runs', after ?? ''],
+    queryKey: ['runs', path],
     queryFn: ({ signal }) => apiGet<RunPage>(path, signal),
     initialData: initial,
     refetchOnMount: false,
@@ -30,7 +37,11 @@ export function RunList({ initial, after }: { initial: RunPage; after?: string }
           <thead>
             <tr className="text-muted">
               {columns.map((column, index) => (
-                <th key={column} scope="col" className={`py-1.5 pr-4 font-medium ${index === 4 ? 'text-right' : 'text-left'}`}>
+                <th
+                  key={column}
+                  scope="col"
+                  className={`py-1.5 pr-4 font-medium ${index === 4 ? 'text-right' : 'text-left'}`}
+                >
                   {column}
                 </th>
               ))}

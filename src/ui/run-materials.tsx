@@ -24,7 +24,11 @@ export function RunMaterials({ materials }: { materials: readonly MaterialSummar
           <thead>
             <tr className="text-muted align-bottom">
               {columns.map((column, index) => (
-                <th key={column} scope="col" className={`px-2 py-1 font-medium first:pl-0 ${index === 0 || index === 4 ? 'text-left' : 'text-right'}`}>
+                <th
+                  key={column}
+                  scope="col"
+                  className={`px-2 py-1 font-medium first:pl-0 ${index === 0 || index === 4 ? 'text-left' : 'text-right'}`}
+                >
                   {column}
                 </th>
               ))}

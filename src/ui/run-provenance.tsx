@@ -40,7 +40,9 @@ export function RunProvenance({ run }: { run: RunItem }) {
         {run.summary?.perMaterial.map(({ material, name, relativeErrorBound, shareOutsideValidRange }) => (
           <Line key={material} term={name}>
             error bound of beta {percentText(relativeErrorBound)}
-            <span className="text-muted block">starlight outside the measured wavelengths: {percentText(shareOutsideValidRange)}</span>
+            <span className="text-muted block">
+              starlight outside the measured wavelengths: {percentText(shareOutsideValidRange)}
+            </span>
           </Line>
         ))}
       </dl>

@@ -19,7 +19,8 @@ export function requestOfDraft(draft: RunDraft): DraftReading {
   const optionalAt = (pointer: string, text: string) => (text.trim() === '' ? undefined : numberAt(pointer, text));
   if (draft.catalogueId === '') problems.catalogueId = 'Choose a catalogue.';
   if (draft.star === '') problems.starSlug = 'Choose a star.';
-  if (draft.structure === 'coated' && draft.model === 'mie' && draft.mantleMaterial === '') problems['optics.mantle.material'] = 'Choose the material of the coating.';
+  if (draft.structure === 'coated' && draft.model === 'mie' && draft.mantleMaterial === '')
+    problems['optics.mantle.material'] = 'Choose the material of the coating.';
   const asked = withoutGaps({
     catalogueId: draft.catalogueId,
     name: draft.name.trim() || undefined,
@@ -41,12 +42,17 @@ export function requestOfDraft(draft: RunDraft): DraftReading {
       : undefined,
     disc: draft.hasDisc ? { opticalDepth: numberAt('disc.opticalDepth', draft.opticalDepth) } : undefined,
     charging: draft.hasCharging
-      ? { potentialV: numberAt('charging.potentialV', draft.potentialV), fieldNT: numberAt('charging.fieldNT', draft.fieldNT) }
+      ? {
+          potentialV: numberAt('charging.potentialV', draft.potentialV),
+          fieldNT: numberAt('charging.fieldNT', draft.fieldNT),
+        }
       : undefined,
   });
   const parsed = runRequest.safeParse(asked);
   for (const issue of parsed.error?.issues ?? []) problems[issue.path.join('.')] ??= sayIssue(issue);
-  return parsed.success && Object.keys(problems).length === 0 ? { request: parsed.data, problems: null } : { request: null, problems };
+  return parsed.success && Object.keys(problems).length === 0
+    ? { request: parsed.data, problems: null }
+    : { request: null, problems };
 }
 
 type ReadNumber = (pointer: string, text: string) => number | undefined;
@@ -69,7 +75,8 @@ function opticsOf(draft: RunDraft, numberAt: ReadNumber) {
     return { model: draft.model, mantle: { material: draft.mantleMaterial, volumeFraction } };
   }
   if (draft.structure === 'fromDensity') return { model: draft.model, porosity: draft.structure, mixing: draft.mixing };
-  if (draft.structure === 'porous') return { model: draft.model, porosity: numberAt('optics.porosity', draft.porosity), mixing: draft.mixing };
+  if (draft.structure === 'porous')
+    return { model: draft.model, porosity: numberAt('optics.porosity', draft.porosity), mixing: draft.mixing };
   return { model: draft.model };
 }
 

@@ -18,9 +18,13 @@ export function RunRow({ run }: { run: RunItem }) {
       <td className="py-2.5 pr-4">{star.name}</td>
       <td className="py-2.5 pr-4">
         <StatusBadge status={run.status} />
-        {run.status === 'running' && <span className="text-muted ml-2 tabular-nums">{Math.round(run.progress * 100)} %</span>}
+        {run.status === 'running' && (
+          <span className="text-muted ml-2 tabular-nums">{Math.round(run.progress * 100)} %</span>
+        )}
       </td>
-      <td className="py-2.5 pr-4 text-right font-mono tabular-nums">{run.summary ? percentText(run.summary.unbound.numberShare) : '—'}</td>
+      <td className="py-2.5 pr-4 text-right font-mono tabular-nums">
+        {run.summary ? percentText(run.summary.unbound.numberShare) : '—'}
+      </td>
       <td className="py-2.5 pr-4">
         <Moment iso={run.createdAt} />
       </td>

@@ -9,7 +9,12 @@ export function RunToggleField({ label, hint, isOn, onChange, children }: Props)
   return (
     <div className="grid gap-3">
       <label className="flex cursor-pointer items-start gap-3">
-        <input type="checkbox" checked={isOn} onChange={(event) => onChange(event.target.checked)} className="accent-chaff mt-1 size-4 shrink-0" />
+        <input
+          type="checkbox"
+          checked={isOn}
+          onChange={(event) => onChange(event.target.checked)}
+          className="accent-chaff mt-1 size-4 shrink-0"
+        />
         <span className="text-sm">
           <span className="font-medium">{label}</span>
           <span className="text-muted block">{hint}</span>

@@ -31,8 +31,14 @@ export function RunWaiting({ run, isOutOfTouch }: { run: RunItem; isOutOfTouch: 
         </Button>
       </div>
       {cancel.isError && <Notice kind="danger">{sayProblem(cancel.error)}</Notice>}
-      {isOutOfTouch && <Notice kind="caution">The server does not answer at the moment. The run itself goes on; this page keeps asking.</Notice>}
-      <p className="text-muted text-sm">You can close this page: the run goes on and waits for you in the list of runs.</p>
+      {isOutOfTouch && (
+        <Notice kind="caution">
+          The server does not answer at the moment. The run itself goes on; this page keeps asking.
+        </Notice>
+      )}
+      <p className="text-muted text-sm">
+        You can close this page: the run goes on and waits for you in the list of runs.
+      </p>
     </section>
   );
 }

@@ -6,7 +6,7 @@ import { longestSession, sessionCookieName, startSession, endSession } from '@/s
 import type { FormState } from './form-state';
 
 /** Runs an action's work and turns a refusal into what the form shows; surprises go on to the error page. */
-export async function formAction(form: FormData, work: () => Promise<FormState>): Promise<FormState> {
+export async function formAction<S extends FormState>(form: FormData, work: () => Promise<S>): Promise<S | FormState> {
   try {
     return await work();
   } catch (error) {

@@ -1,5 +1,11 @@
 import { z } from 'zod';
-import { catalogueDefaults, catalogueGrainItem, catalogueItem, invalidRowRule, rejectItem } from '@/src/catalogues/schema';
+import {
+  catalogueDefaults,
+  catalogueGrainItem,
+  catalogueItem,
+  invalidRowRule,
+  rejectItem,
+} from '@/src/catalogues/schema';
 import { columnMapping } from '@/src/catalogues/mapping';
 import { materialItem } from '@/src/materials/schema';
 import { grainQuery } from '@/src/runs/grain-query';
@@ -12,10 +18,17 @@ import { pageOf, pageQuery } from './page-schema';
 
 const params = z.object({ id: z.uuid() });
 const accepted = z.object({ id: z.uuid(), status: z.string() });
-const withTotal = <T extends z.ZodType>(item: T) => pageOf(item).extend({ total: z.number().int().describe('Rows that match the filter') });
+const withTotal = <T extends z.ZodType>(item: T) =>
+  pageOf(item).extend({ total: z.number().int().describe('Rows that match the filter') });
 
 export const contract = {
-  listCatalogues: { method: 'get', path: '/catalogues', summary: "The group's catalogues, newest first", query: pageQuery, reply: pageOf(catalogueItem) },
+  listCatalogues: {
+    method: 'get',
+    path: '/catalogues',
+    summary: "The group's catalogues, newest first",
+    query: pageQuery,
+    reply: pageOf(catalogueItem),
+  },
   uploadCatalogue: {
     method: 'post',
     path: '/catalogues',
@@ -40,11 +53,40 @@ export const contract = {
     query: catalogueGrainQuery,
     reply: withTotal(catalogueGrainItem),
   },
-  listRejects: { method: 'get', path: '/catalogues/{id}/rejects', summary: 'Rows that were not accepted, and why', params, query: pageQuery, reply: withTotal(rejectItem) },
-  downloadRejects: { method: 'get', path: '/catalogues/{id}/rejects.csv', summary: 'The same as CSV', params, reply: 'text/csv' },
-  downloadOriginal: { method: 'get', path: '/catalogues/{id}/original', summary: 'The very bytes that were uploaded', params, reply: 'application/octet-stream' },
-  listStars: { method: 'get', path: '/stars', summary: 'Star presets, newest published version of each', reply: pageOf(starItem) },
-  listMaterials: { method: 'get', path: '/materials', summary: 'Materials, newest published version of each', reply: pageOf(materialItem) },
+  listRejects: {
+    method: 'get',
+    path: '/catalogues/{id}/rejects',
+    summary: 'Rows that were not accepted, and why',
+    params,
+    query: pageQuery,
+    reply: withTotal(rejectItem),
+  },
+  downloadRejects: {
+    method: 'get',
+    path: '/catalogues/{id}/rejects.csv',
+    summary: 'The same as CSV',
+    params,
+    reply: 'text/csv',
+  },
+  downloadOriginal: {
+    method: 'get',
+    path: '/catalogues/{id}/original',
+    summary: 'The very bytes that were uploaded',
+    params,
+    reply: 'application/octet-stream',
+  },
+  listStars: {
+    method: 'get',
+    path: '/stars',
+    summary: 'Star presets, newest published version of each',
+    reply: pageOf(starItem),
+  },
+  listMaterials: {
+    method: 'get',
+    path: '/materials',
+    summary: 'Materials, newest published version of each',
+    reply: pageOf(materialItem),
+  },
   computeCurve: {
     method: 'post',
     path: '/curves',
@@ -60,10 +102,31 @@ export const contract = {
     query: pageQuery.extend({ catalogueId: z.uuid().optional() }),
     reply: pageOf(runItem),
   },
-  requestRun: { method: 'post', path: '/runs', summary: 'Request a run; it is computed in the background', body: runRequest, reply: accepted, status: 202, limit: 'run' },
+  requestRun: {
+    method: 'post',
+    path: '/runs',
+    summary: 'Request a run; it is computed in the background',
+    body: runRequest,
+    reply: accepted,
+    status: 202,
+    limit: 'run',
+  },
   getRun: { method: 'get', path: '/runs/{id}', summary: 'One run: status, inputs, summary', params, reply: runItem },
-  cancelRun: { method: 'post', path: '/runs/{id}/cancel', summary: 'Stop a run that is queued or running', params, reply: accepted },
-  listRunGrains: { method: 'get', path: '/runs/{id}/grains', summary: 'What a run says of each grain, sorted and filtered over all rows', params, query: grainQuery, reply: withTotal(runGrainItem) },
+  cancelRun: {
+    method: 'post',
+    path: '/runs/{id}/cancel',
+    summary: 'Stop a run that is queued or running',
+    params,
+    reply: accepted,
+  },
+  listRunGrains: {
+    method: 'get',
+    path: '/runs/{id}/grains',
+    summary: 'What a run says of each grain, sorted and filtered over all rows',
+    params,
+    query: grainQuery,
+    reply: withTotal(runGrainItem),
+  },
   getRunHistogram: {
     method: 'get',
     path: '/runs/{id}/histogram',
@@ -72,6 +135,18 @@ export const contract = {
     query: z.object({ by: z.enum(histogramBy).default('number') }),
     reply: runHistogram,
   },
-  getRunCurves: { method: 'get', path: '/runs/{id}/curves', summary: 'The efficiency and beta curves that the run used', params, reply: runCurves },
-  exportRun: { method: 'get', path: '/runs/{id}/export.csv', summary: 'All grains of a run as CSV', params, reply: 'text/csv' },
+  getRunCurves: {
+    method: 'get',
+    path: '/runs/{id}/curves',
+    summary: 'The efficiency and beta curves that the run used',
+    params,
+    reply: runCurves,
+  },
+  exportRun: {
+    method: 'get',
+    path: '/runs/{id}/export.csv',
+    summary: 'All grains of a run as CSV',
+    params,
+    reply: 'text/csv',
+  },
 } as const satisfies Record<string, Endpoint>;

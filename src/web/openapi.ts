@@ -1,4 +1,10 @@
-import { OpenAPIRegistry, OpenApiGeneratorV31, extendZodWithOpenApi, type ResponseConfig, type RouteConfig } from '@asteasolutions/zod-to-openapi';
+import {
+  OpenAPIRegistry,
+  OpenApiGeneratorV31,
+  extendZodWithOpenApi,
+  type ResponseConfig,
+  type RouteConfig,
+} from '@asteasolutions/zod-to-openapi';
 import { z } from 'zod';
 import { contract } from './contract';
 import type { Endpoint } from './endpoint';
@@ -37,7 +43,10 @@ function pathOf(operationId: string, endpoint: Endpoint): RouteConfig {
   const content = body
     ? { content: { 'application/json': { schema: body } }, required: true }
     : form && { content: { 'multipart/form-data': { schema: form } }, required: true };
-  const problem: ResponseConfig = { description: 'Refused, with the reason', content: { 'application/problem+json': { schema: problemSchema } } };
+  const problem: ResponseConfig = {
+    description: 'Refused, with the reason',
+    content: { 'application/problem+json': { schema: problemSchema } },
+  };
   return {
     method,
     path,

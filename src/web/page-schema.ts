@@ -12,4 +12,7 @@ export const pageQuery = z.object({
 });
 
 export const pageOf = <T extends z.ZodType>(item: T) =>
-  z.object({ items: z.array(item), next: z.string().nullable().describe('Give as `after` for the next page; null at the end') });
+  z.object({
+    items: z.array(item),
+    next: z.string().nullable().describe('Give as `after` for the next page; null at the end'),
+  });

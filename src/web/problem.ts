@@ -23,7 +23,14 @@ export const problemSchema = z.object({
   detail: z.string(),
   instance: z.string(),
   errors: z
-    .array(z.object({ pointer: z.string().optional(), row: z.number().optional(), column: z.string().optional(), detail: z.string() }))
+    .array(
+      z.object({
+        pointer: z.string().optional(),
+        row: z.number().optional(),
+        column: z.string().optional(),
+        detail: z.string(),
+      }),
+    )
     .optional(),
 });
 
@@ -33,14 +40,26 @@ export function refusalOfZod(error: z.ZodError, what: string): Refusal {
     detail: issue.message,
   }));
   const first = problems[0];
-  return new Refusal('invalid', `The ${what} is not valid: ${first?.pointer === '/' ? '' : `${first?.pointer} `}${first?.detail}.`, problems);
+  return new Refusal(
+    'invalid',
+    `The ${what} is not valid: ${first?.pointer === '/' ? '' : `${first?.pointer} `}${first?.detail}.`,
+    problems,
+  );
 }
 
 /** RFC 9457. Surprises are logged with an id and shown as a calm line. */
 export function problemResponse(error: unknown): Response {
   const instance = `urn:uuid:${randomUUID()}`;
   if (error instanceof Refusal) {
-    return problem(error.status, error.kind, titles[error.kind], error.message, instance, error.problems, error.retryAfterS);
+    return problem(
+      error.status,
+      error.kind,
+      titles[error.kind],
+      error.message,
+      instance,
+      error.problems,
+      error.retryAfterS,
+    );
   }
   log.error({ err: error, instance }, 'request failed');
   const detail = 'Something went wrong on our side. Try again; if it stays, tell the administrator the instance id.';

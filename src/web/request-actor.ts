@@ -4,7 +4,8 @@ import { Refusal } from '@/src/errors';
 import { actorOfSession, actorOfToken } from '@/src/people/actors';
 import { sessionCookieName } from '@/src/people/sessions';
 
-const signInFirst = () => new Refusal('unauthenticated', 'Sign in, or send a personal token as "Authorization: Bearer ...".');
+const signInFirst = () =>
+  new Refusal('unauthenticated', 'Sign in, or send a personal token as "Authorization: Bearer ...".');
 
 /** Cookie or bearer, never both: with a bearer token cookies are ignored. */
 export async function requestActor(em: EntityManager, request: Request): Promise<Actor> {
@@ -34,6 +35,7 @@ export function cookieValue(header: string | null, name: string): string | undef
 export function refuseCrossSite(request: Request): void {
   const site = request.headers.get('sec-fetch-site');
   const origin = request.headers.get('origin');
-  const sameOrigin = site === null ? origin !== null && new URL(origin).host === request.headers.get('host') : site === 'same-origin';
+  const sameOrigin =
+    site === null ? origin !== null && new URL(origin).host === request.headers.get('host') : site === 'same-origin';
   if (!sameOrigin) throw new Refusal('forbidden', 'This change did not come from a page of this site.');
 }

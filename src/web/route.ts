@@ -59,7 +59,8 @@ function parse(schema: z.ZodType | undefined, value: unknown, what: string, kind
 function queryOf(request: Request): Record<string, string> {
   const found = new Map<string, string>();
   for (const [key, value] of new URL(request.url).searchParams) {
-    if (found.has(key)) throw new Refusal('invalid', `The query gives ${key} twice.`, [{ pointer: `/${key}`, detail: 'is given twice' }]);
+    if (found.has(key))
+      throw new Refusal('invalid', `The query gives ${key} twice.`, [{ pointer: `/${key}`, detail: 'is given twice' }]);
     found.set(key, value);
   }
   return Object.fromEntries(found);

@@ -12,7 +12,10 @@ type Asked = {
 };
 
 /** Calls a route handler as the web server would. */
-export function call(handler: Handler, { as, params = {}, query = {}, json, form, headers = {}, method }: Asked = {}): Promise<Response> {
+export function call(
+  handler: Handler,
+  { as, params = {}, query = {}, json, form, headers = {}, method }: Asked = {},
+): Promise<Response> {
   const url = `http://localhost/api/v1/x?${new URLSearchParams(query)}`;
   const body = form ?? (json === undefined ? undefined : JSON.stringify(json));
   const request = new Request(url, {
@@ -27,7 +30,10 @@ export function call(handler: Handler, { as, params = {}, query = {}, json, form
   return handler(request, { params: Promise.resolve(params) });
 }
 
-export async function json<T = Record<string, unknown>>(response: Promise<Response> | Response, status = 200): Promise<T> {
+export async function json<T = Record<string, unknown>>(
+  response: Promise<Response> | Response,
+  status = 200,
+): Promise<T> {
   const answered = await response;
   const text = await answered.text();
   if (answered.status !== status) throw new Error(`expected ${status}, got ${answered.status}: ${text}`);

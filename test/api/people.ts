@@ -18,7 +18,11 @@ export async function newGroup(name = `Group ${++made}`): Promise<string> {
 }
 
 /** A person of a group with a token; the password is of no use to anyone. */
-export async function newMember(groupId: string, role: GroupRole, scopes: TokenScope[] = ['read', 'write']): Promise<Member> {
+export async function newMember(
+  groupId: string,
+  role: GroupRole,
+  scopes: TokenScope[] = ['read', 'write'],
+): Promise<Member> {
   const em = await forkEm();
   const email = `person${++made}@example.org`;
   const person = em.create(Person, { name: `Person ${made}`, email, passwordHash: 'none' });

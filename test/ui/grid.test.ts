@@ -6,7 +6,12 @@ import { countWords } from '@/src/ui/grid/row-source';
 
 describe('asking for rows', () => {
   it('sends sort, filters that say something, and the block', () => {
-    const path = gridRequest('/api/v1/runs/1/grains', { fate: 'unbound', label: ' ', betaMin: ' 0.5 ' }, { field: 'beta', order: 'desc' }, 200);
+    const path = gridRequest(
+      '/api/v1/runs/1/grains',
+      { fate: 'unbound', label: ' ', betaMin: ' 0.5 ' },
+      { field: 'beta', order: 'desc' },
+      200,
+    );
     expect(path).toBe('/api/v1/runs/1/grains?sort=beta&order=desc&fate=unbound&betaMin=0.5&limit=100&offset=200');
   });
   it('asks for the first block without an offset', () => {

@@ -8,7 +8,10 @@ import { parseRadiusRange, rangeAround, writeRadiusRange } from '@/src/ui/plots/
 
 describe('the CSV of a plot', () => {
   it('has units in the header, full precision and CRLF (RFC 4180)', () => {
-    const csv = plotCsv({ columns: [{ title: 'radius', unit: 'µm' }, { title: 'beta' }], rows: [[0.1234567890123, null]] });
+    const csv = plotCsv({
+      columns: [{ title: 'radius', unit: 'µm' }, { title: 'beta' }],
+      rows: [[0.1234567890123, null]],
+    });
     expect(csv).toBe('radius (µm),beta\r\n0.1234567890123,\r\n');
   });
   it('quotes text and disarms formulas, but leaves negative numbers alone', () => {
@@ -51,7 +54,12 @@ describe('the labels of the cutoffs', () => {
     { name: 'D', unboundIntervalsUm: [[0.2, null]] as [number, null][] },
   ];
   it('stand at finite ends only, in order of radius', () => {
-    expect(cutoffsOf(materials, [-2, 2]).map(({ label }) => label)).toEqual(['A 0.100', 'D 0.200', 'A 0.500', 'B 0.510']);
+    expect(cutoffsOf(materials, [-2, 2]).map(({ label }) => label)).toEqual([
+      'A 0.100',
+      'D 0.200',
+      'A 0.500',
+      'B 0.510',
+    ]);
   });
   it('avoid each other when they are close', () => {
     const [, , a, b] = cutoffsOf(materials, [-2, 2]);
@@ -65,8 +73,14 @@ describe('the labels of the cutoffs', () => {
 describe('the size distribution', () => {
   it('shows shares of the whole, and keeps the absolute weights in its table', () => {
     const histogram = { by: 'number' as const, unit: 'grains', edgesUm: [0.1, 1, 10], unbound: [3, 0], bound: [0, 1] };
-    expect(binsOf(histogram).map(({ unbound, bound }) => [unbound, bound])).toEqual([[0.75, 0], [0, 0.25]]);
-    expect(sizeDistributionTable(histogram).rows).toEqual([[0.1, 1, 75, 0, 3, 0], [1, 10, 0, 25, 0, 1]]);
+    expect(binsOf(histogram).map(({ unbound, bound }) => [unbound, bound])).toEqual([
+      [0.75, 0],
+      [0, 0.25],
+    ]);
+    expect(sizeDistributionTable(histogram).rows).toEqual([
+      [0.1, 1, 75, 0, 3, 0],
+      [1, 10, 0, 25, 0, 1],
+    ]);
   });
 });
 

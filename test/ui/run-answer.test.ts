@@ -4,9 +4,12 @@ import * as words from '@/src/ui/run-answer';
 
 /** Units do not break away from their numbers on screen; here that would only make the expected text hard to read. */
 const breakable = (text: string) => text.replaceAll('\u00a0', ' ');
-const intervalsInWords = (...given: Parameters<typeof words.intervalsInWords>) => breakable(words.intervalsInWords(...given));
-const materialSentence = (...given: Parameters<typeof words.materialSentence>) => breakable(words.materialSentence(...given));
-const runAnswer = (...given: Parameters<typeof words.runAnswer>): words.RunAnswer => JSON.parse(breakable(JSON.stringify(words.runAnswer(...given))));
+const intervalsInWords = (...given: Parameters<typeof words.intervalsInWords>) =>
+  breakable(words.intervalsInWords(...given));
+const materialSentence = (...given: Parameters<typeof words.materialSentence>) =>
+  breakable(words.materialSentence(...given));
+const runAnswer = (...given: Parameters<typeof words.runAnswer>): words.RunAnswer =>
+  JSON.parse(breakable(JSON.stringify(words.runAnswer(...given))));
 
 const carbon: MaterialSummary = {
   material: 'carbon_be',
@@ -73,13 +76,21 @@ describe('the sentence of a material', () => {
     expect(materialSentence(carbon)).toBe('Amorphous carbon below 1.21 µm.');
   });
   it('is "between" for a window with two ends', () => {
-    const silicate = { ...carbon, name: 'Astronomical silicate', unboundIntervalsUm: [[0.056, 0.62]] as [number, number][] };
+    const silicate = {
+      ...carbon,
+      name: 'Astronomical silicate',
+      unboundIntervalsUm: [[0.056, 0.62]] as [number, number][],
+    };
     expect(materialSentence(silicate)).toBe('Astronomical silicate between 0.0560 and 0.620 µm.');
   });
   it('lists several windows', () => {
-    expect(intervalsInWords([[0, 0.01], [0.1, 0.2], [0.3, 0.4]])).toBe(
-      'below 0.0100 µm, between 0.100 and 0.200 µm and between 0.300 and 0.400 µm',
-    );
+    expect(
+      intervalsInWords([
+        [0, 0.01],
+        [0.1, 0.2],
+        [0.3, 0.4],
+      ]),
+    ).toBe('below 0.0100 µm, between 0.100 and 0.200 µm and between 0.300 and 0.400 µm');
   });
   it('tells open ends and touching points apart', () => {
     expect(intervalsInWords([[2, null]])).toBe('above 2.00 µm');
@@ -95,7 +106,9 @@ describe('around the answer', () => {
     expect(answer.materials[0].geometric).toBe('With Q_pr = 1: below 0.638 µm.');
   });
   it('says that the radii hold for the mean density', () => {
-    expect(runAnswer(summary, 'the Sun').notes[1]).toContain('mean density of each material (Amorphous carbon 1.80 g/cm³)');
+    expect(runAnswer(summary, 'the Sun').notes[1]).toContain(
+      'mean density of each material (Amorphous carbon 1.80 g/cm³)',
+    );
   });
   it('mentions the expected share only when the errors move it', () => {
     const moved = { ...summary, unbound: { ...summary.unbound, expectedNumberShare: 0.59 } };

@@ -19,12 +19,15 @@ export function CalculatorAnswer({ answer, name }: { answer: CurveAnswer; name: 
     <>
       <div className="border-chaff border-l-4 pl-5" role="status">
         <p className="font-serif text-2xl leading-snug sm:text-3xl">{sentenceOf(answer, name)}</p>
-        <p className="text-muted mt-1">With Q_pr = 1 it would be unbound below {radiusText(answer.geometricBlowoutRadiusUm)}.</p>
+        <p className="text-muted mt-1">
+          With Q_pr = 1 it would be unbound below {radiusText(answer.geometricBlowoutRadiusUm)}.
+        </p>
       </div>
       <Numbers answer={answer} />
       {answer.shareOutsideValidRange > warnAboveShare && (
         <p className="text-sm">
-          <strong>Bear in mind:</strong> {percentText(answer.shareOutsideValidRange)} of the starlight lies outside the wavelengths at which the optical constants were measured.
+          <strong>Bear in mind:</strong> {percentText(answer.shareOutsideValidRange)} of the starlight lies outside the
+          wavelengths at which the optical constants were measured.
         </p>
       )}
       {answer.notes.map((note) => (

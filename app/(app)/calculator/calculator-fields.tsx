@@ -46,12 +46,36 @@ export function CalculatorFields({ text, problems, onChange, stars, materials }:
         problem={problems.densityGCm3}
         hint={material && `Empty: ${exactText(material.densityGCm3, 4)}, that of the material`}
       />
-      <RunTextField label="Porosity" value={text.porosity} onChange={(porosity) => onChange({ porosity })} problem={problems['optics.porosity']} hint="Empty: solid grains" />
-      <RunSelectField label="Star" value={text.star} onChange={(slug) => onChange({ star: slug })} choices={starChoices(stars)} problem={problems.starSlug} hint={star && starFigures(star)} />
+      <RunTextField
+        label="Porosity"
+        value={text.porosity}
+        onChange={(porosity) => onChange({ porosity })}
+        problem={problems['optics.porosity']}
+        hint="Empty: solid grains"
+      />
+      <RunSelectField
+        label="Star"
+        value={text.star}
+        onChange={(slug) => onChange({ star: slug })}
+        choices={starChoices(stars)}
+        problem={problems.starSlug}
+        hint={star && starFigures(star)}
+      />
       {text.star === ownStar && <StarNumbersFields numbers={text} problems={problems} onChange={onChange} />}
-      <RunChoiceField legend="Unbound from" value={text.threshold} onChange={(threshold) => onChange({ threshold })} choices={thresholds} />
+      <RunChoiceField
+        legend="Unbound from"
+        value={text.threshold}
+        onChange={(threshold) => onChange({ threshold })}
+        choices={thresholds}
+      />
       {text.threshold === 'beta' ? (
-        <RunTextField label="Critical beta" value={text.betaCritical} onChange={(betaCritical) => onChange({ betaCritical })} problem={problems.betaCritical} hint="0.5 for a circular parent orbit" />
+        <RunTextField
+          label="Critical beta"
+          value={text.betaCritical}
+          onChange={(betaCritical) => onChange({ betaCritical })}
+          problem={problems.betaCritical}
+          hint="0.5 for a circular parent orbit"
+        />
       ) : (
         <RunTextField
           label="Eccentricity of the parent"

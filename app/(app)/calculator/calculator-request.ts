@@ -38,12 +38,15 @@ export function requestOfCalculator(text: CalculatorText): CalculatorReading {
     slug: text.material,
     ...starOf(text, numberAt),
     densityGCm3: optionalAt('densityGCm3', text.density),
-    betaCritical: text.threshold === 'beta' ? numberAt('betaCritical', text.betaCritical) : criticalOf(text.eccentricity, problems),
+    betaCritical:
+      text.threshold === 'beta' ? numberAt('betaCritical', text.betaCritical) : criticalOf(text.eccentricity, problems),
     optics: { model: 'mie', ...(porosity ? { porosity } : {}) },
   };
   const parsed = curveRequest.safeParse(asked);
   for (const issue of parsed.error?.issues ?? []) problems[issue.path.join('.')] ??= sayIssue(issue);
-  return parsed.success && Object.keys(problems).length === 0 ? { request: parsed.data, problems: null } : { request: null, problems };
+  return parsed.success && Object.keys(problems).length === 0
+    ? { request: parsed.data, problems: null }
+    : { request: null, problems };
 }
 
 function criticalOf(eccentricity: string, problems: Record<string, string>): number | undefined {

@@ -32,7 +32,7 @@ export function Calculator({ stars, materials }: { stars: readonly StarItem[]; m
     <div className="grid items-start gap-8 lg:grid-cols-[20rem_minmax(0,1fr)]">
       <CalculatorFields text={text} problems={problems ?? {}} onChange={setText} stars={stars} materials={materials} />
       <div className="grid min-w-0 gap-4">
-        {error && <Notice kind="danger">{sayProblem(error)}</Notice>}
+        {error !== null && <Notice kind="danger">{sayProblem(error)}</Notice>}
         <p role="status" className="text-muted min-h-5 text-sm">
           {problems ? 'Waiting for the fields at the side.' : isFetching ? 'Computing ...' : ''}
         </p>

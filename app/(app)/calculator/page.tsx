@@ -14,7 +14,10 @@ export default async function CalculatorPage() {
   const { items: materials } = await listMaterials(em, actor);
   return (
     <>
-      <PageHeader title="Calculator" subtitle="One material, one star: beta over radius and the radii that go unbound. Nothing is stored; the address keeps what you typed." />
+      <PageHeader
+        title="Calculator"
+        subtitle="One material, one star: beta over radius and the radii that go unbound. Nothing is stored; the address keeps what you typed."
+      />
       <Calculator stars={stars} materials={materials} />
     </>
   );

@@ -16,7 +16,11 @@ export default async function RunsPage({ searchParams }: { searchParams: Promise
   const page = await listRuns(await pageEm(), actor, { limit: perPage, after });
   return (
     <>
-      <PageHeader title="Runs" subtitle="Each run is one catalogue, one star and one release, frozen by value." actions={newRun} />
+      <PageHeader
+        title="Runs"
+        subtitle="Each run is one catalogue, one star and one release, frozen by value."
+        actions={newRun}
+      />
       {page.items.length === 0 && !after ? (
         <EmptyState title="No runs yet" action={newRun}>
           A run says which grains of a catalogue the light of a star removes.

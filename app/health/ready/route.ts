@@ -14,4 +14,5 @@ export async function GET(): Promise<Response> {
   }
 }
 
-const answer = (status: number, word: string) => Response.json({ status: word }, { status, headers: { 'cache-control': 'no-store' } });
+const answer = (status: number, word: string) =>
+  Response.json({ status: word }, { status, headers: { 'cache-control': 'no-store' } });

@@ -13,13 +13,19 @@ type Props = {
 const inputClass = 'border-line bg-panel h-8 rounded border px-2';
 
 export function FilterControl({ id, filter, values, problem, onChange }: Props) {
-  if (filter.kind === 'range') return <RangeFilter id={id} filter={filter} values={values} problem={problem} onChange={onChange} />;
+  if (filter.kind === 'range')
+    return <RangeFilter id={id} filter={filter} values={values} problem={problem} onChange={onChange} />;
   const value = values[filter.param] ?? '';
   return (
     <div className="grid gap-0.5 text-sm">
       <label htmlFor={id}>{filter.label}</label>
       {filter.kind === 'choice' ? (
-        <select id={id} value={value} className={inputClass} onChange={(event) => onChange(filter.param, event.target.value)}>
+        <select
+          id={id}
+          value={value}
+          className={inputClass}
+          onChange={(event) => onChange(filter.param, event.target.value)}
+        >
           <option value="">All</option>
           {filter.choices.map((choice) => (
             <option key={choice.value} value={choice.value}>
@@ -28,13 +34,24 @@ export function FilterControl({ id, filter, values, problem, onChange }: Props) 
           ))}
         </select>
       ) : (
-        <input id={id} value={value} className={`${inputClass} w-32`} onChange={(event) => onChange(filter.param, event.target.value)} />
+        <input
+          id={id}
+          value={value}
+          className={`${inputClass} w-32`}
+          onChange={(event) => onChange(filter.param, event.target.value)}
+        />
       )}
     </div>
   );
 }
 
-function RangeFilter({ id, filter, values, problem, onChange }: Props & { filter: Extract<GridFilter, { kind: 'range' }> }) {
+function RangeFilter({
+  id,
+  filter,
+  values,
+  problem,
+  onChange,
+}: Props & { filter: Extract<GridFilter, { kind: 'range' }> }) {
   const end = (param: string, which: 'from' | 'to') => (
     <input
       inputMode="decimal"

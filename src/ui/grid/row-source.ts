@@ -21,7 +21,12 @@ export function rowSource({ client, endpoint, filters, onTold }: Source): IDatas
           staleTime: staleAfterMs,
         });
         successCallback(page.items, page.total);
-        onTold(countWords(page.total, Object.values(filters).some((value) => value !== '')));
+        onTold(
+          countWords(
+            page.total,
+            Object.values(filters).some((value) => value !== ''),
+          ),
+        );
       } catch (error) {
         failCallback();
         onTold(sayProblem(error));

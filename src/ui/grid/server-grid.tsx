@@ -22,7 +22,14 @@ const InfiniteGrid = dynamic(async () => (await import('./infinite-grid')).Infin
 });
 
 /** A table of any length: rows are fetched as they come into view; sorting and filtering happen in the database. */
-export function ServerGrid({ endpoint, columns, label, filters = [], initialSort, height = 'h-[32rem]' }: ServerGridProps) {
+export function ServerGrid({
+  endpoint,
+  columns,
+  label,
+  filters = [],
+  initialSort,
+  height = 'h-[32rem]',
+}: ServerGridProps) {
   const [values, setValues] = useState<FilterValues>({});
   const [told, setTold] = useState('');
   return (
@@ -31,8 +38,18 @@ export function ServerGrid({ endpoint, columns, label, filters = [], initialSort
       <p className="text-muted my-2 text-sm" role="status">
         {told || 'Counting rows ...'}
       </p>
-      <div className={`${height} border-line bg-panel w-full overflow-hidden rounded-md border`} role="region" aria-label={label}>
-        <InfiniteGrid endpoint={endpoint} columns={columns} filters={values} initialSort={initialSort} onTold={setTold} />
+      <div
+        className={`${height} border-line bg-panel w-full overflow-hidden rounded-md border`}
+        role="region"
+        aria-label={label}
+      >
+        <InfiniteGrid
+          endpoint={endpoint}
+          columns={columns}
+          filters={values}
+          initialSort={initialSort}
+          onTold={setTold}
+        />
       </div>
     </div>
   );

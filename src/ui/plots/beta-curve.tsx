@@ -33,4 +33,5 @@ export function BetaCurvePlot({ curves, betaCritical, rangeUm, fileName, height,
   );
 }
 
-const unboundWords = ({ name, unboundIntervalsUm }: BetaCurve) => `${name}: unbound ${intervalsInWords(unboundIntervalsUm)}.`;
+const unboundWords = ({ name, unboundIntervalsUm }: BetaCurve) =>
+  `${name}: unbound ${intervalsInWords(unboundIntervalsUm)}.`;

@@ -8,7 +8,12 @@ type Marks = { shapes: Partial<Shape>[]; annotations: NonNullable<Layout['annota
 const labelHeight = 0.062;
 
 /** Where each material goes unbound: the windows as a faint wash, their ends as labelled lines with the material's dash. */
-export function cutoffMarks(materials: readonly MaterialWindows[], rangeUm: RadiusRangeUm, style: LabelStyle, palette: PlotPalette): Marks {
+export function cutoffMarks(
+  materials: readonly MaterialWindows[],
+  rangeUm: RadiusRangeUm,
+  style: LabelStyle,
+  palette: PlotPalette,
+): Marks {
   const cutoffs = cutoffsOf(materials, asLog(rangeUm), style);
   const lines: Partial<Shape>[] = cutoffs.map(({ radiusUm, material, level }) => ({
     type: 'line',

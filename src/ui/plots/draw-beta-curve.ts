@@ -17,14 +17,33 @@ export type BetaCurve = {
 /** Beta over radius, one dash per material; the part at or above the critical value is drawn strong, its ends marked. */
 export function drawBetaCurve(curves: readonly BetaCurve[], betaCritical: number, rangeUm: RadiusRangeUm): DrawFigure {
   return (palette) => ({
-    data: curves.flatMap((curve, index) => [line(curve, index, palette), strong(curve, index, betaCritical, palette), ends(curve, index, betaCritical, palette)]),
+    data: curves.flatMap((curve, index) => [
+      line(curve, index, palette),
+      strong(curve, index, betaCritical, palette),
+      ends(curve, index, betaCritical, palette),
+    ]),
     layout: {
       margin: plotMargin,
       hovermode: 'closest',
       xaxis: radiusAxis(rangeUm),
-      yaxis: { type: 'log', title: { text: 'β' }, range: betaRange(curves, betaCritical, rangeUm), exponentformat: 'power', dtick: 1, fixedrange: true },
+      yaxis: {
+        type: 'log',
+        title: { text: 'β' },
+        range: betaRange(curves, betaCritical, rangeUm),
+        exponentformat: 'power',
+        dtick: 1,
+        fixedrange: true,
+      },
       shapes: [
-        { type: 'line', xref: 'paper', x0: 0, x1: 1, y0: betaCritical, y1: betaCritical, line: { color: palette.unbound, width: 1.5, dash: 'dash' } },
+        {
+          type: 'line',
+          xref: 'paper',
+          x0: 0,
+          x1: 1,
+          y0: betaCritical,
+          y1: betaCritical,
+          line: { color: palette.unbound, width: 1.5, dash: 'dash' },
+        },
       ],
       annotations: [
         {
@@ -73,7 +92,12 @@ function strong({ name, radiiUm, beta }: BetaCurve, index: number, betaCritical:
 
 const endSymbols = ['circle', 'diamond', 'square', 'triangle-up', 'cross', 'star'] as const;
 
-function ends({ name, unboundIntervalsUm }: BetaCurve, index: number, betaCritical: number, palette: PlotPalette): Data {
+function ends(
+  { name, unboundIntervalsUm }: BetaCurve,
+  index: number,
+  betaCritical: number,
+  palette: PlotPalette,
+): Data {
   const radii = unboundIntervalsUm.flat().filter((radius): radius is number => radius !== null && radius > 0);
   return {
     type: 'scatter',
@@ -83,13 +107,24 @@ function ends({ name, unboundIntervalsUm }: BetaCurve, index: number, betaCritic
     x: radii,
     y: radii.map(() => betaCritical),
     hovertemplate: `${name}: critical at %{x:.4g} µm<extra></extra>`,
-    marker: { symbol: nthOf(endSymbols, index), size: 10, color: nthOf(palette.materials, index), line: { color: palette.paper, width: 1.5 } },
+    marker: {
+      symbol: nthOf(endSymbols, index),
+      size: 10,
+      color: nthOf(palette.materials, index),
+      line: { color: palette.paper, width: 1.5 },
+    },
   };
 }
 
 /** As powers of ten: what is in view, never without the critical value. */
-export function betaRange(curves: readonly BetaCurve[], betaCritical: number, [lowUm, highUm]: RadiusRangeUm): [number, number] {
-  const seen = curves.flatMap(({ radiiUm, beta }) => beta.filter((value, index) => value > 0 && radiiUm[index] >= lowUm && radiiUm[index] <= highUm));
+export function betaRange(
+  curves: readonly BetaCurve[],
+  betaCritical: number,
+  [lowUm, highUm]: RadiusRangeUm,
+): [number, number] {
+  const seen = curves.flatMap(({ radiiUm, beta }) =>
+    beta.filter((value, index) => value > 0 && radiiUm[index] >= lowUm && radiiUm[index] <= highUm),
+  );
   const top = Math.max(betaCritical, ...seen) * 1.6;
   const bottom = Math.min(betaCritical, ...seen) / 1.6;
   return [Math.log10(Math.max(bottom, top * 1e-5)), Math.log10(top)];
@@ -99,6 +134,8 @@ export function betaRange(curves: readonly BetaCurve[], betaCritical: number, [l
 export function betaCurveTable(curves: readonly BetaCurve[]): PlotTable {
   return {
     columns: [{ title: 'Material' }, { title: 'Radius', unit: 'µm' }, { title: 'Q_pr' }, { title: 'Beta' }],
-    rows: curves.flatMap(({ name, radiiUm, qpr, beta }) => radiiUm.map((radius, index) => [name, radius, qpr[index], beta[index]])),
+    rows: curves.flatMap(({ name, radiiUm, qpr, beta }) =>
+      radiiUm.map((radius, index) => [name, radius, qpr[index], beta[index]]),
+    ),
   };
 }

@@ -9,16 +9,31 @@ import type { RadiusRangeUm } from './radius-range';
 import type { LabelStyle, MaterialWindows } from './unbound-window';
 import { weightWords } from './weights';
 
-export type SizeDistribution = { histogram: RunHistogram; materials: readonly MaterialWindows[]; rangeUm: RadiusRangeUm };
+export type SizeDistribution = {
+  histogram: RunHistogram;
+  materials: readonly MaterialWindows[];
+  rangeUm: RadiusRangeUm;
+};
 
-export function drawSizeDistribution({ histogram, materials, rangeUm }: SizeDistribution, style: LabelStyle): DrawFigure {
+export function drawSizeDistribution(
+  { histogram, materials, rangeUm }: SizeDistribution,
+  style: LabelStyle,
+): DrawFigure {
   return (palette) => ({
     data: [bars(histogram, 'bound', palette), bars(histogram, 'unbound', palette)],
     layout: {
       barmode: 'stack',
       bargap: 0,
       margin: { ...plotMargin, t: 76 },
-      legend: { orientation: 'h', x: 1, y: 0.98, xanchor: 'right', yanchor: 'top', bgcolor: palette.paper, traceorder: 'reversed' },
+      legend: {
+        orientation: 'h',
+        x: 1,
+        y: 0.98,
+        xanchor: 'right',
+        yanchor: 'top',
+        bgcolor: palette.paper,
+        traceorder: 'reversed',
+      },
       xaxis: radiusAxis(rangeUm),
       yaxis: { title: { text: `Share of ${weightWords[histogram.by]} (%)` }, rangemode: 'tozero', fixedrange: true },
       ...cutoffMarks(materials, rangeUm, style, palette),
@@ -28,7 +43,17 @@ export function drawSizeDistribution({ histogram, materials, rangeUm }: SizeDist
 
 function bars(histogram: RunHistogram, fate: 'bound' | 'unbound', palette: PlotPalette): Data {
   const bins = binsOf(histogram);
-  const hatched = fate === 'unbound' ? { shape: '/' as const, fillmode: 'overlay' as const, fgcolor: palette.paper, fgopacity: 0.75, size: 7, solidity: 0.25 } : undefined;
+  const hatched =
+    fate === 'unbound'
+      ? {
+          shape: '/' as const,
+          fillmode: 'overlay' as const,
+          fgcolor: palette.paper,
+          fgopacity: 0.75,
+          size: 7,
+          solidity: 0.25,
+        }
+      : undefined;
   return {
     type: 'bar',
     name: fate === 'unbound' ? 'Unbound' : 'Bound',

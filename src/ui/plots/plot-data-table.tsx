@@ -11,15 +11,26 @@ export function PlotDataTable({ table, title }: { table: PlotTable; title: strin
   const [opened, setOpened] = useState(false);
   return (
     <details className="text-sm" onToggle={(event) => setOpened(event.currentTarget.open)}>
-      <summary className="text-muted hover:text-ink w-fit cursor-pointer py-1">Show data ({table.rows.length} rows)</summary>
+      <summary className="text-muted hover:text-ink w-fit cursor-pointer py-1">
+        Show data ({table.rows.length} rows)
+      </summary>
       {opened && (
-        <div className="border-line mt-1 max-h-72 overflow-auto rounded border" tabIndex={0} role="region" aria-label={`Data: ${title}`}>
+        <div
+          className="border-line mt-1 max-h-72 overflow-auto rounded border"
+          tabIndex={0}
+          role="region"
+          aria-label={`Data: ${title}`}
+        >
           <table className="w-full text-right font-mono tabular-nums">
             <caption className="sr-only">{title}</caption>
             <thead className="bg-paper sticky top-0">
               <tr>
                 {table.columns.map((column) => (
-                  <th key={column.title} scope="col" className="border-line border-b px-3 py-1 font-sans font-medium whitespace-nowrap">
+                  <th
+                    key={column.title}
+                    scope="col"
+                    className="border-line border-b px-3 py-1 font-sans font-medium whitespace-nowrap"
+                  >
                     {columnHeading(column)}
                   </th>
                 ))}

@@ -13,7 +13,16 @@ const fontFamily = '"Instrument Sans Variable", "Instrument Sans", system-ui, sa
 /** The look shared by all plots. On screen the key stands outside the drawing; a file carries its own. */
 export function completeFigure(draw: DrawFigure, palette: PlotPalette, goal: 'screen' | 'file'): Figure {
   const { data, layout } = draw(palette);
-  const axis = { gridcolor: palette.line, linecolor: palette.muted, tickcolor: palette.muted, zeroline: false, showline: true, ticks: 'outside', ticklen: 4, automargin: true };
+  const axis = {
+    gridcolor: palette.line,
+    linecolor: palette.muted,
+    tickcolor: palette.muted,
+    zeroline: false,
+    showline: true,
+    ticks: 'outside',
+    ticklen: 4,
+    automargin: true,
+  };
   return {
     data,
     layout: {
@@ -23,7 +32,11 @@ export function completeFigure(draw: DrawFigure, palette: PlotPalette, goal: 'sc
       font: { family: fontFamily, size: 13, color: palette.ink },
       margin: { l: 64, r: 16, t: 12, b: 48 },
       dragmode: 'zoom',
-      hoverlabel: { bgcolor: palette.paper, bordercolor: palette.muted, font: { family: fontFamily, color: palette.ink } },
+      hoverlabel: {
+        bgcolor: palette.paper,
+        bordercolor: palette.muted,
+        font: { family: fontFamily, color: palette.ink },
+      },
       legend: { orientation: 'h', x: 1, y: 1.02, xanchor: 'right', yanchor: 'bottom', bgcolor: 'rgba(0,0,0,0)' },
       ...layout,
       showlegend: goal === 'file',

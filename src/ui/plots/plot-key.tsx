@@ -8,7 +8,12 @@ export function PlotKey({ entries, palette }: { entries: readonly KeyEntry[]; pa
     <ul className="flex min-h-6 flex-wrap gap-x-5 gap-y-1 text-sm">
       {entries.map(({ label, sample }) => (
         <li key={label} className="flex items-center gap-2">
-          {palette && ('line' in sample ? <LineSample index={sample.line} palette={palette} /> : <BarSample fate={sample.bar} palette={palette} />)}
+          {palette &&
+            ('line' in sample ? (
+              <LineSample index={sample.line} palette={palette} />
+            ) : (
+              <BarSample fate={sample.bar} palette={palette} />
+            ))}
           {label}
         </li>
       ))}
@@ -28,7 +33,15 @@ const strokeDashes: Record<(typeof materialDashes)[number], string | undefined> 
 function LineSample({ index, palette }: { index: number; palette: PlotPalette }) {
   return (
     <svg width="34" height="8" aria-hidden="true" className="shrink-0">
-      <line x1="0" x2="34" y1="4" y2="4" strokeWidth="2.5" stroke={nthOf(palette.materials, index)} strokeDasharray={strokeDashes[nthOf(materialDashes, index)]} />
+      <line
+        x1="0"
+        x2="34"
+        y1="4"
+        y2="4"
+        strokeWidth="2.5"
+        stroke={nthOf(palette.materials, index)}
+        strokeDasharray={strokeDashes[nthOf(materialDashes, index)]}
+      />
     </svg>
   );
 }

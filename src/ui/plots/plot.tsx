@@ -26,7 +26,18 @@ export type PlotProps = {
   onZoomX?: (range: LogRange) => void;
 };
 
-export function Plot({ title, summary, caption, draw, table, fileName, height = 'h-80', controls, keyEntries, onZoomX }: PlotProps) {
+export function Plot({
+  title,
+  summary,
+  caption,
+  draw,
+  table,
+  fileName,
+  height = 'h-80',
+  controls,
+  keyEntries,
+  onZoomX,
+}: PlotProps) {
   const palette = usePlotPalette();
   const figure = useMemo(() => palette && completeFigure(draw, palette, 'screen'), [draw, palette]);
   const zoomed = (event: unknown) => {
@@ -42,7 +53,14 @@ export function Plot({ title, summary, caption, draw, table, fileName, height = 
       <PlotKey entries={keyEntries} palette={palette} />
       <div className={`${height} w-full`} role="img" aria-label={summary}>
         {figure ? (
-          <PlotlyCanvas data={figure.data} layout={figure.layout} config={plotConfig} className="h-full w-full" useResizeHandler onRelayout={zoomed} />
+          <PlotlyCanvas
+            data={figure.data}
+            layout={figure.layout}
+            config={plotConfig}
+            className="h-full w-full"
+            useResizeHandler
+            onRelayout={zoomed}
+          />
         ) : (
           <PlotSkeleton />
         )}

@@ -19,11 +19,30 @@ export function RadiusRangeControl({ rangeUm, isZoomed, onChoose }: Props) {
   };
   const [from, to] = rangeUm.map((radius) => String(Number(radius.toPrecision(3))));
   return (
-    <form onSubmit={submit} className="flex flex-wrap items-center gap-2 text-sm" aria-label="Radii shown" key={`${from}-${to}`}>
+    <form
+      onSubmit={submit}
+      className="flex flex-wrap items-center gap-2 text-sm"
+      aria-label="Radii shown"
+      key={`${from}-${to}`}
+    >
       <label htmlFor={`${id}-from`}>Radii from</label>
-      <input id={`${id}-from`} name="from" defaultValue={from} inputMode="decimal" aria-describedby={`${id}-problem`} className={inputClass} />
+      <input
+        id={`${id}-from`}
+        name="from"
+        defaultValue={from}
+        inputMode="decimal"
+        aria-describedby={`${id}-problem`}
+        className={inputClass}
+      />
       <label htmlFor={`${id}-to`}>to</label>
-      <input id={`${id}-to`} name="to" defaultValue={to} inputMode="decimal" aria-describedby={`${id}-problem`} className={inputClass} />
+      <input
+        id={`${id}-to`}
+        name="to"
+        defaultValue={to}
+        inputMode="decimal"
+        aria-describedby={`${id}-problem`}
+        className={inputClass}
+      />
       <span aria-hidden="true">µm</span>
       <Button type="submit" variant="quiet" size="small">
         Show

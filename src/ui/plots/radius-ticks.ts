@@ -12,7 +12,9 @@ function steps(width: number): number[] {
   if (width > 2.6) return [1];
   if (width > 1.2) return [1, 2, 5];
   if (width > 0.4) return [1, 1.5, 2, 3, 4, 5, 7];
-  return Array.from({ length: 90 }, (_, index) => 1 + index / 10).filter((_, index) => width <= 0.15 || index % 2 === 0);
+  return Array.from({ length: 90 }, (_, index) => 1 + index / 10).filter(
+    (_, index) => width <= 0.15 || index % 2 === 0,
+  );
 }
 
 function decades(from: number, to: number): number[] {

@@ -14,7 +14,10 @@ type Props = SizeDistribution & { fileName: string } & Pick<PlotProps, 'controls
 
 export function SizeDistributionPlot({ histogram, materials, rangeUm, fileName, controls, onZoomX }: Props) {
   const style = useIsNarrow() ? 'short' : 'full';
-  const draw = useMemo(() => drawSizeDistribution({ histogram, materials, rangeUm }, style), [histogram, materials, rangeUm, style]);
+  const draw = useMemo(
+    () => drawSizeDistribution({ histogram, materials, rangeUm }, style),
+    [histogram, materials, rangeUm, style],
+  );
   const table = useMemo(() => sizeDistributionTable(histogram), [histogram]);
   return (
     <Plot

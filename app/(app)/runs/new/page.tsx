@@ -28,8 +28,17 @@ export default async function NewRunPage({ searchParams }: { searchParams: Promi
   const initial = await draftOf(em, actor, await searchParams, stars[0]?.slug ?? '');
   return (
     <>
-      <PageHeader title="New run" subtitle="One star, one way of letting the grains go: which of them does the light remove?" />
-      <RunForm action={requestRunAction} initial={initial} catalogues={catalogues} stars={stars} materials={materials} />
+      <PageHeader
+        title="New run"
+        subtitle="One star, one way of letting the grains go: which of them does the light remove?"
+      />
+      <RunForm
+        action={requestRunAction}
+        initial={initial}
+        catalogues={catalogues}
+        stars={stars}
+        materials={materials}
+      />
     </>
   );
 }

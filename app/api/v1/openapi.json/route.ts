@@ -1,3 +1,4 @@
 import { openApiDocument } from '@/src/web/openapi';
 
-export const GET = (): Response => Response.json(openApiDocument(), { headers: { 'cache-control': 'public, max-age=300' } });
+export const GET = (): Response =>
+  Response.json(openApiDocument(), { headers: { 'cache-control': 'public, max-age=300' } });

@@ -2,4 +2,6 @@ import { findRunHistogram } from '@/src/runs/find-run-histogram';
 import { contract } from '@/src/web/contract';
 import { route } from '@/src/web/route';
 
-export const GET = route(contract.getRunHistogram, ({ em, actor, params, query }) => findRunHistogram(em, actor, params.id, query.by));
+export const GET = route(contract.getRunHistogram, ({ em, actor, params, query }) =>
+  findRunHistogram(em, actor, params.id, query.by),
+);

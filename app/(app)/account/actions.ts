@@ -1,0 +1,43 @@
+'use server';
+
+import { revalidatePath } from 'next/cache';
+import { z } from 'zod';
+import { makeToken, revokeToken } from '@/src/people/tokens';
+import { formAction } from '@/src/web/action';
+import type { FormState } from '@/src/web/form-state';
+import { pageActor, pageEm } from '@/src/web/page';
+import { parseForm } from '@/src/web/parse-form';
+import { countAgainst } from '@/src/web/rate-limit';
+
+const tokenForm = z.object({
+  name: z.string().trim().min(1, 'is needed').max(100),
+  access: z.enum(['read', 'write']),
+  expiresInDays: z.coerce.number().int().min(1, 'must be 1 to 365').max(365, 'must be 1 to 365'),
+});
+
+export type TokenState = FormState & { token?: string };
+
+export async function makeTokenAction(_state: TokenState, form: FormData): Promise<TokenState> {
+  return formAction<TokenState>(form, async () => {
+    const actor = await pageActor();
+    const { name, access, expiresInDays } = parseForm(tokenForm, form);
+    await countAgainst('tokens', actor.personId);
+    const { token } = await makeToken(await pageEm(), actor, {
+      name,
+      scopes: access === 'write' ? ['read', 'write'] : ['read'],
+      expiresInDays,
+    });
+    revalidatePath('/account');
+    return { token };
+  });
+}
+
+export async function revokeTokenAction(_state: FormState, form: FormData): Promise<FormState> {
+  return formAction(form, async () => {
+    const actor = await pageActor();
+    const { id } = parseForm(z.object({ id: z.uuid() }), form);
+    await revokeToken(await pageEm(), actor, id);
+    revalidatePath('/account');
+    return {};
+  });
+}
