@@ -10,7 +10,7 @@ function* filesBelow(base, path, isLeftOut) {
 }
 
 /** One hash over names and contents, the same wherever the checkout lies and whenever its files were written. */
-export function fingerprint(base, paths, isLeftOut = () => false) {
+export function fingerprint(base, paths, isLeftOut = (_path) => false) {
   const hash = createHash('sha256');
   for (const path of paths) {
     for (const file of filesBelow(base, path, isLeftOut)) {

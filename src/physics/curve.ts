@@ -61,7 +61,7 @@ const LEAST_ERROR = { opaque: 1e-4, hazy: 2e-4, clear: 1e-3 };
  */
 export function buildCurve(recipe: OpticsRecipe, spectrum: Spectrum, options: BuildOptions = {}): Curve {
   const clarity = clarityOf(recipe, spectrum);
-  const grid = spectralGrid(spectrum, clarity.rule.lastLevel + 1, narrowFeatures(recipe));
+  const grid = spectralGrid(spectrum, clarity.lastLevel + 1, narrowFeatures(recipe));
   const sampler = grainSampler(recipe, grid.wavelengthM);
   const median = medianWavelengthM(grid);
   const tailIndex = indexOfRadius((TAIL_START_M * median) / REFERENCE_MEDIAN_M, TAIL_ALIGNMENT);

@@ -35,7 +35,7 @@ export function mieNodes(
   const compute = (indices: number[]) => {
     for (const index of indices) {
       step(Math.min(0.95, done / total));
-      const mean = spectralMean(sampler, grid, radiusOfIndex(index), clarity.rule);
+      const mean = spectralMean(sampler, grid, radiusOfIndex(index), clarity.ruleAt(radiusOfIndex(index)));
       capped ||= !mean.settled;
       known.set(index, { index, qPr: mean.qPr, qAbs: mean.qAbs, relativeError: mean.relativeError });
       done += costOf(index);

@@ -1,4 +1,4 @@
-import { jStat } from 'jstat';
+import jStat from 'jstat';
 
 /** Standard normal distribution function. Absolute error below 1e-14 (jstat's erfc; compared with tables in the tests). */
 export function normalCdf(z: number): number {
