@@ -6,12 +6,12 @@ import { Wordmark } from '@/src/ui/wordmark';
 export default function AccountLayout({ children }: { children: ReactNode }) {
   return (
     <div className="mx-auto grid max-w-md gap-10 px-5 py-8">
-      <div className="flex items-center justify-between">
+      <header className="flex items-center justify-between">
         <Link href="/" aria-label="Chaffline, front page">
           <Wordmark />
         </Link>
         <ThemeSwitch />
-      </div>
+      </header>
       <main id="content">{children}</main>
     </div>
   );

@@ -21,7 +21,7 @@ const SHARE_THAT_COUNTS = 0.01;
 /** Resonances need total reflection inside: below this index grains of any size had none that showed. */
 const LEAST_RESONANT_N = 1.1;
 /** Optical depth along the diameter from which no ripple is left. */
-const DARK_DEPTH = 12;
+const DARK_DEPTH = 6;
 
 /**
  * Mie resonances are about 2 k/n wide in ln wavelength. Measured over the 22 library materials and k = 1e-8 at 5772 K:
@@ -34,7 +34,7 @@ const rules = {
   clear: { firstLevel: 7, lastLevel: 9, relativeTolerance: 2.5e-4 },
 } satisfies Record<string, DoublingRule>;
 
-const rayLevels = { opaque: 2, hazy: 4, clear: 6 };
+const rayLevels = { opaque: 2, hazy: 3, clear: 6 };
 
 /** Clarity of a recipe in a spectrum, from the optical constants of what light meets first. */
 export function clarityOf(recipe: OpticsRecipe, spectrum: Spectrum): Clarity {

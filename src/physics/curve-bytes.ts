@@ -1,6 +1,7 @@
 import type { Curve } from './curve';
 
 const HEADER_NUMBERS = 7;
+const END_OF_NOTES = ']'.charCodeAt(0);
 
 /** Bytes of a curve (little endian): seven numbers, both coefficient arrays, then the notes as JSON. Exact. */
 export function encodeCurve(curve: Curve): Uint8Array {
@@ -31,6 +32,8 @@ export function decodeCurve(bytes: Uint8Array): Curve {
   const absorptionCount = number(6);
   const absorptionStart = HEADER_NUMBERS + coefficientCount;
   const notesStart = absorptionStart + absorptionCount;
+  if (bytes.length <= 8 * notesStart || bytes[bytes.length - 1] !== END_OF_NOTES)
+    throw new RangeError('The bytes of an efficiency curve are cut short.');
   const notes: unknown = JSON.parse(new TextDecoder().decode(bytes.subarray(8 * notesStart)));
   return {
     lnRadiusMin: number(0),

@@ -5,14 +5,24 @@ import { CURVE_INTERVALS, radiusOfIndex, type CurveNode } from './radius-grid';
 import { rayOptics, type RayOptics } from './ray-optics';
 import type { SpectralGrid } from './spectral-grid';
 
-const TAIL_STEP = 8;
+const TAIL_STEP = 16;
 /** The fit uses the Mie means of the last factor 6 in radius before the tail. */
 const FIT_FACTOR = 6;
+/** Mie means inside the tail of opaque grains, for metals approach their limit slowly: at 3 and 12 times its start. */
+const ANCHOR_INDICES = [44, 100];
+/** Mie and ray optics are compared on the same wavelengths, so that few will do. */
+const ANCHOR_LEVEL = 1;
 const RESIDUAL_MARGIN = 3;
-/** Powers of 1/s; the third would only follow the noise of transparent materials' means. */
+/** Powers of 1/s; more would only follow the noise of transparent materials' means. */
 const POWERS = [1, 4 / 3, 5 / 3];
+const ANCHORED_POWERS = [2 / 3, 1, 4 / 3, 5 / 3];
 /** Through a mantle the core shines: the surface's ray optics then misses the limit by a constant. */
 const COATED_POWERS = [0, 1, 4 / 3];
+
+interface Means {
+  qPr: number;
+  qAbs: number;
+}
 
 interface Ray {
   weight: number;
@@ -35,18 +45,22 @@ export function largeGrainTail(
 ): { nodes: CurveNode[]; relativeError: number } {
   const rays = raysOf(sampler, grid, clarity.rayLevel);
   const tailStartM = radiusOfIndex(tailIndex);
-  const fitted = mieNodes.filter((node) => radiusOfIndex(node.index) >= tailStartM / FIT_FACTOR);
-  const scaled = (index: number) => radiusOfIndex(index) / tailStartM;
-  const limits = fitted.map((node) => rayMean(rays, radiusOfIndex(node.index)));
-  const terms = (index: number) => (sampler.isCoated ? COATED_POWERS : POWERS).map((power) => scaled(index) ** -power);
-
+  const isAnchored = clarity.kind === 'opaque' && !sampler.isCoated;
+  const powers = sampler.isCoated ? COATED_POWERS : isAnchored ? ANCHORED_POWERS : POWERS;
+  const terms = (index: number) => powers.map((power) => (radiusOfIndex(index) / tailStartM) ** -power);
+  const below = mieNodes.filter((node) => radiusOfIndex(node.index) >= tailStartM / FIT_FACTOR);
+  const fitted = [
+    ...below.map((node) => ({ node, limit: rayMean(rays, radiusOfIndex(node.index)) })),
+    ...(isAnchored ? anchorsOf(sampler, grid, tailIndex) : []),
+  ];
+  const rows = fitted.map(({ node }) => terms(node.index));
   const pressure = leastSquares(
-    fitted.map((node) => terms(node.index)),
-    fitted.map((node, row) => node.qPr - limits[row].qPr),
+    rows,
+    fitted.map(({ node, limit }) => node.qPr - limit.qPr),
   );
   const absorption = leastSquares(
-    fitted.map((node) => terms(node.index)),
-    fitted.map((node, row) => (limits[row].qAbs > 0 ? node.qAbs / limits[row].qAbs - 1 : 0)),
+    rows,
+    fitted.map(({ node, limit }) => (limit.qAbs > 0 ? node.qAbs / limit.qAbs - 1 : 0)),
   );
   const nodes: CurveNode[] = [];
   for (let index = tailIndex + TAIL_STEP; index <= CURVE_INTERVALS; index += TAIL_STEP) {
@@ -57,11 +71,28 @@ export function largeGrainTail(
       qAbs: limit.qAbs * (1 + dot(absorption, terms(index))),
     });
   }
-  const relativeError = fitted.reduce((worst, node, row) => {
-    const residual = node.qPr - limits[row].qPr - dot(pressure, terms(node.index));
+  const relativeError = fitted.reduce((worst, { node, limit }, row) => {
+    const residual = node.qPr - limit.qPr - dot(pressure, rows[row]);
     return Math.max(worst, Math.abs(residual) / node.qPr);
   }, 0);
   return { nodes, relativeError: RESIDUAL_MARGIN * relativeError };
+}
+
+/** Mie means of radii inside the tail beside the ray-optics means that the same few wavelengths give. */
+function anchorsOf(sampler: GrainSampler, grid: SpectralGrid, tailIndex: number): { node: CurveNode; limit: Means }[] {
+  const rays = raysOf(sampler, grid, ANCHOR_LEVEL);
+  const weights = grid.weights[ANCHOR_LEVEL];
+  const stride = (grid.wavelengthM.length - 1) / (weights.length - 1);
+  const pair = new Float64Array(2);
+  return ANCHOR_INDICES.map((offset) => {
+    const node = { index: tailIndex + offset, qPr: 0, qAbs: 0 };
+    weights.forEach((weight, position) => {
+      sampler.sample(pair, radiusOfIndex(node.index), position * stride);
+      node.qPr += weight * pair[0];
+      node.qAbs += weight * pair[1];
+    });
+    return { node, limit: rayMean(rays, radiusOfIndex(node.index)) };
+  });
 }
 
 function raysOf(sampler: GrainSampler, grid: SpectralGrid, level: number): Ray[] {
@@ -75,7 +106,7 @@ function raysOf(sampler: GrainSampler, grid: SpectralGrid, level: number): Ray[]
   );
 }
 
-function rayMean(rays: Ray[], radiusM: number): { qPr: number; qAbs: number } {
+function rayMean(rays: Ray[], radiusM: number): Means {
   const pair = new Float64Array(2);
   let qPr = 0;
   let qAbs = 0;

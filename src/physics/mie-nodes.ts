@@ -2,7 +2,7 @@ import type { Clarity } from './clarity';
 import { splineSlopes } from './cubic-spline';
 import type { GrainSampler } from './grain-sampler';
 import { hermite } from './hermite';
-import { LN_RADIUS_STEP, radiusOfIndex, type CurveNode } from './radius-grid';
+import { LN_RADIUS_STEP, lnQ, radiusOfIndex, type CurveNode } from './radius-grid';
 import type { SpectralGrid } from './spectral-grid';
 import { spectralMean } from './spectral-mean';
 
@@ -10,15 +10,18 @@ const FIRST_STEP = 16;
 const LAST_STEP = 2;
 /** The error of a spline falls 16-fold when its step is halved; half of that is counted on. */
 const GAIN_OF_HALVING = 8;
-const INTERPOLATION_TOLERANCE = 4e-5;
+/** Means of clear grains keep a noise of 3e-4: more radii would only follow it. */
+const INTERPOLATION_TOLERANCE = { opaque: 4e-5, hazy: 4e-5, clear: 1e-4 };
+/** Absorption only leads to temperatures, which take a quarter of its error. */
+const ABSORPTION_TOLERANCE = 1.5e-4;
 
 interface Means extends CurveNode {
   relativeError: number;
 }
 
 /**
- * Mie means from the smallest radius up to `lastIndex`, on every 8th grid radius and on more where the spline of ln Q through
- * the known radii misses the one in the middle. `step` is told the share of the work done before each radius.
+ * Mie means from the smallest radius up to `lastIndex`, on every 8th grid radius and on more where the splines of ln Q_pr or
+ * ln Q_abs through the known radii miss the one in the middle. `step` is told the share of the work done before each radius.
  */
 export function mieNodes(
   sampler: GrainSampler,
@@ -50,7 +53,8 @@ export function mieNodes(
   let interpolationError = 0;
   for (let width = FIRST_STEP; width > LAST_STEP && active.length > 0; width /= 2) {
     const sorted = inOrder(known);
-    const predict = splineOf(sorted);
+    const predict = splineOf(sorted, ({ qPr }) => qPr);
+    const predictAbsorption = splineOf(sorted, ({ qAbs }) => qAbs);
     const fresh = middles(width);
     total = Math.max(total, done + fresh.reduce((sum, index) => sum + costOf(index), 0));
     compute(fresh);
@@ -58,10 +62,11 @@ export function mieNodes(
     for (const left of active) {
       const middle = known.get(left + width / 2);
       if (middle === undefined) continue;
-      const expected = Math.abs(Math.log(middle.qPr) - predict(middle.index)) / GAIN_OF_HALVING;
+      const expected = Math.abs(lnQ(middle.qPr) - predict(middle.index)) / GAIN_OF_HALVING;
       const noise = middle.relativeError / 2;
-      if (expected > Math.max(INTERPOLATION_TOLERANCE, noise) && width / 2 > LAST_STEP)
-        next.push(left, left + width / 2);
+      const missed = Math.abs(lnQ(middle.qAbs) - predictAbsorption(middle.index)) / GAIN_OF_HALVING;
+      const isRough = expected > Math.max(INTERPOLATION_TOLERANCE[clarity.kind], noise) || missed > ABSORPTION_TOLERANCE;
+      if (isRough && width / 2 > LAST_STEP) next.push(left, left + width / 2);
       else interpolationError = Math.max(interpolationError, expected);
     }
     active = next;
@@ -79,10 +84,10 @@ function inOrder(known: Map<number, Means>): Means[] {
   return [...known.values()].sort((a, b) => a.index - b.index);
 }
 
-/** ln Q_pr at any grid index from the spline through the nodes. */
-function splineOf(nodes: CurveNode[]): (index: number) => number {
+/** ln Q at any grid index from the spline through the nodes. */
+function splineOf(nodes: CurveNode[], q: (node: CurveNode) => number): (index: number) => number {
   const x = Float64Array.from(nodes, (node) => node.index * LN_RADIUS_STEP);
-  const y = Float64Array.from(nodes, (node) => Math.log(node.qPr));
+  const y = Float64Array.from(nodes, (node) => lnQ(q(node)));
   const slopes = splineSlopes(x, y);
   return (index) => {
     const position = nodes.findIndex((node) => node.index > index) - 1;

@@ -1,6 +1,7 @@
 import { brentRoot } from './brent';
 import { dielectricFunction, EV_UM } from './materials';
 import type { DielectricModel, OpticsRecipe } from './optics';
+import { CURVE_RADIUS_MIN_M } from './radius-grid';
 
 /** A place in the spectrum where the optical constants change within a small relative step of wavelength. */
 export interface NarrowFeature {
@@ -9,46 +10,65 @@ export interface NarrowFeature {
 }
 
 const NARROW = 0.03;
-/** Narrower resonances absorb next to nothing and would only starve the rest of the grid. */
-const NARROWEST = 1e-5;
+/** A sphere of size parameter x resonates lower by a share of the order of x^2: so wide a crowd serves all radii. */
+const SHIFT_PER_X2 = 0.3;
 const SCAN_STEPS = 120;
-/** A small sphere resonates above the oscillator, at most this much higher (relative) for any oscillator strength met. */
+/** A small sphere resonates above the oscillator, at most this much higher (relative) for any oscillator strength met ... */
 const LARGEST_SHIFT = 0.2;
+/** ... or so many widths, if it is a wide one: beyond its wing little absorbs, and the resonance is narrow all the same. */
+const SHIFT_IN_WIDTHS = 5;
 
 /**
- * Oscillators of a recipe narrower than 3 % and the resonances eps = -2 that small spheres have above them (Bohren & Huffman
- * 1983, section 12.2): wavelength grids crowd there, since a grain small against the wavelength may owe most of its
- * absorption to one such place. Without it 1 nm grains of one library material err by 30 %.
+ * Oscillators of a recipe narrower than 3 % and the resonances eps = -2 that small spheres have above an oscillator (Bohren
+ * & Huffman 1983, section 12.2) where those are narrow: wavelength grids crowd there, since a grain small against the
+ * wavelength may owe most of its absorption to one such place. Without it 1 nm grains of one library material err by 30 %.
  */
 export function narrowFeatures({ core, mantle }: OpticsRecipe): NarrowFeature[] {
   const components = [...core.components, ...(mantle?.optics.components ?? [])];
-  return components.flatMap(({ model }) => (model.kind === 'oscillators' ? featuresOf(model) : []));
+  return withoutRepeats(components.flatMap(({ model }) => (model.kind === 'oscillators' ? featuresOf(model) : [])));
 }
 
 function featuresOf(model: DielectricModel): NarrowFeature[] {
   return [...model.gauss, ...model.lorentz]
-    .filter(([, centreEv, widthEv]) => widthEv / centreEv < NARROW)
     .flatMap(([, centreEv, widthEv]) => [
       { wavelengthM: wavelengthOf(centreEv), relativeWidth: widthEv / centreEv },
       ...sphereResonance(model, centreEv, widthEv / centreEv),
-    ]);
+    ])
+    .filter(({ relativeWidth }) => relativeWidth < NARROW);
 }
 
 /** First rise of Re eps through -2 above an oscillator, as wide as Im eps makes it; none when Re eps stays above -2. */
 function sphereResonance(model: DielectricModel, centreEv: number, relativeWidth: number): NarrowFeature[] {
   const excess = (energyEv: number) => dielectricFunction(model, energyEv)[0] + 2;
-  const energyAt = (step: number) =>
-    centreEv * (1 + relativeWidth * Math.expm1((step / SCAN_STEPS) * Math.log1p(LARGEST_SHIFT / relativeWidth)));
+  const reach = Math.log1p(Math.max(LARGEST_SHIFT / relativeWidth, SHIFT_IN_WIDTHS));
+  const energyAt = (step: number) => centreEv * (1 + relativeWidth * Math.expm1((step / SCAN_STEPS) * reach));
+  let low = energyAt(0);
+  let isBelow = excess(low) < 0;
   for (let step = 1; step <= SCAN_STEPS; step++) {
-    const low = energyAt(step - 1);
     const high = energyAt(step);
-    if (excess(low) >= 0 || excess(high) < 0) continue;
-    const energyEv = brentRoot(excess, low, high, 1e-12 * centreEv);
-    const slope = excess(energyEv * (1 + 1e-6)) / 1e-6;
-    const width = dielectricFunction(model, energyEv)[1] / slope;
-    return [{ wavelengthM: wavelengthOf(energyEv), relativeWidth: Math.max(width, NARROWEST) }];
+    const isAbove = excess(high) >= 0;
+    if (isBelow && isAbove) {
+      const energyEv = brentRoot(excess, low, high, 1e-12 * centreEv);
+      const slope = excess(energyEv * (1 + 1e-6)) / 1e-6;
+      const width = dielectricFunction(model, energyEv)[1] / slope;
+      const wavelengthM = wavelengthOf(energyEv);
+      const smallestX = (2 * Math.PI * CURVE_RADIUS_MIN_M) / wavelengthM;
+      return [{ wavelengthM, relativeWidth: Math.max(width, SHIFT_PER_X2 * smallestX ** 2) }];
+    }
+    low = high;
+    isBelow = !isAbove;
   }
   return [];
+}
+
+/** Several oscillators may lead to the same resonance. */
+function withoutRepeats(features: NarrowFeature[]): NarrowFeature[] {
+  return features.filter(
+    (feature, index) =>
+      !features
+        .slice(0, index)
+        .some((other) => Math.abs(other.wavelengthM / feature.wavelengthM - 1) < 0.1 * feature.relativeWidth),
+  );
 }
 
 function wavelengthOf(energyEv: number): number {

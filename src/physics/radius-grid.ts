@@ -12,6 +12,14 @@ export interface CurveNode {
   qAbs: number;
 }
 
+/** Q_abs of a lossless material has no logarithm; this stands for zero. */
+const LEAST_Q = 1e-300;
+
+/** Logarithm of an efficiency, as curves store it. */
+export function lnQ(q: number): number {
+  return Math.log(Math.max(q, LEAST_Q));
+}
+
 /** Radius in m of a grid index. */
 export function radiusOfIndex(index: number): number {
   return Math.exp(LN_RADIUS_MIN + index * LN_RADIUS_STEP);

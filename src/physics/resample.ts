@@ -1,9 +1,6 @@
 import { splineSlopes } from './cubic-spline';
 import { hermite } from './hermite';
-import { CURVE_INTERVALS } from './radius-grid';
-
-/** Q of a lossless material has no logarithm; this stands for zero. */
-const LEAST_Q = 1e-300;
+import { CURVE_INTERVALS, lnQ } from './radius-grid';
 
 /**
  * Cubic coefficients of ln Q on every interval of the radius grid from [index, Q] nodes that lie on it, first and last
@@ -11,7 +8,7 @@ const LEAST_Q = 1e-300;
  */
 export function resampledCoefficients(nodes: [number, number][]): Float64Array {
   const x = Float64Array.from(nodes, ([index]) => index);
-  const y = Float64Array.from(nodes, ([, q]) => Math.log(Math.max(q, LEAST_Q)));
+  const y = Float64Array.from(nodes, ([, q]) => lnQ(q));
   const slopes = splineSlopes(x, y);
   const coefficients = new Float64Array(4 * CURVE_INTERVALS);
   let left = 0;

@@ -14,7 +14,7 @@ type Props<Row> = {
 export function DataTable<Row>({ caption, columns, rows, rowKey, minWidth = 'min-w-[52rem]' }: Props<Row>) {
   const align = (column: DataColumn<Row>) => (column.isNumber ? 'text-right font-mono tabular-nums' : 'text-left');
   return (
-    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label={caption}>
+    <div className="overflow-x-auto" tabIndex={0} role="region" aria-label={`Table: ${caption}`}>
       <table className={`w-full ${minWidth} text-sm`}>
         <caption className="sr-only">{caption}</caption>
         <thead>

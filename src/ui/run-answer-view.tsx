@@ -12,8 +12,10 @@ export function RunAnswer({ run, summary }: { run: RunItem; summary: RunSummary 
         The answer
       </h2>
       <p className="max-w-4xl font-serif text-2xl leading-snug text-balance sm:text-3xl">{answer.headline.map(part)}</p>
-      <h3 className="text-muted mt-5 text-sm">Unbound radii</h3>
-      <ul className="mt-1 grid gap-1.5">
+      <p className="text-muted mt-5 text-sm" id="unbound-radii">
+        Unbound radii
+      </p>
+      <ul className="mt-1 grid gap-1.5" aria-labelledby="unbound-radii">
         {answer.materials.map(({ material, text, geometric }) => (
           <li key={material} className="flex flex-wrap items-baseline gap-x-3">
             <span className="font-serif text-lg">{text}</span>

@@ -18,7 +18,7 @@ const columns = [
 export function RunMaterials({ materials }: { materials: readonly MaterialSummary[] }) {
   return (
     <RunSection id="materials" title="By material">
-      <div className="overflow-x-auto" tabIndex={0} role="region" aria-labelledby="materials">
+      <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Table of materials">
         <table className="w-full min-w-[56rem] text-sm">
           <caption className="sr-only">Unbound radii and numbers of each material</caption>
           <thead>

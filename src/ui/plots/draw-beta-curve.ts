@@ -3,6 +3,7 @@ import { exactText } from '@/src/ui/run-figures';
 import type { DrawFigure } from './plot-figure';
 import { materialDashes, nthOf, type PlotPalette } from './plot-palette';
 import type { PlotTable } from './plot-table';
+import { decadeTicks } from './decade-ticks';
 import { plotMargin, radiusAxis } from './radius-axis';
 import type { RadiusRangeUm } from './radius-range';
 
@@ -30,8 +31,7 @@ export function drawBetaCurve(curves: readonly BetaCurve[], betaCritical: number
         type: 'log',
         title: { text: 'β' },
         range: betaRange(curves, betaCritical, rangeUm),
-        exponentformat: 'power',
-        dtick: 1,
+        ...decadeTicks(betaRange(curves, betaCritical, rangeUm)),
         fixedrange: true,
       },
       shapes: [

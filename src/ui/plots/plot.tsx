@@ -47,7 +47,7 @@ export function Plot({
   return (
     <figure className="min-w-0">
       <div className="mb-1 flex flex-wrap items-center justify-between gap-x-4 gap-y-1">
-        <h3 className="font-serif text-lg">{title}</h3>
+        <p className="font-serif text-lg">{title}</p>
         {controls}
       </div>
       <PlotKey entries={keyEntries} palette={palette} />
