@@ -1,22 +1,13 @@
 'use client';
 
-import { Button } from '@/src/ui/button';
+import { SomethingWentWrong, type ErrorPageProps } from '@/src/ui/something-went-wrong';
 import { Wordmark } from '@/src/ui/wordmark';
 
-export default function ErrorPage({ error, reset }: { error: Error & { digest?: string }; reset: () => void }) {
+export default function ErrorPage(props: ErrorPageProps) {
   return (
     <main id="content" className="mx-auto grid max-w-xl gap-5 px-5 py-16">
       <Wordmark />
-      <h1 className="text-3xl">Something went wrong on our side</h1>
-      <p className="text-muted">
-        What you stored is safe. Try again; if it stays, tell the administrator
-        {error.digest ? ` the code ${error.digest}` : ''}.
-      </p>
-      <div>
-        <Button variant="primary" onClick={reset}>
-          Try again
-        </Button>
-      </div>
+      <SomethingWentWrong {...props} />
     </main>
   );
 }

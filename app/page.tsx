@@ -4,6 +4,7 @@ import { ThemeSwitch } from '@/src/ui/theme-switch';
 import { WinnowingFigure } from '@/src/ui/winnowing-figure';
 import { Wordmark } from '@/src/ui/wordmark';
 import { optionalActor } from '@/src/web/page';
+import { DemoAnswer } from './demo-answer';
 
 const promises = [
   [
@@ -34,7 +35,7 @@ export default async function FrontPage() {
           </LinkButton>
         </div>
       </header>
-      <main id="content" className="grid gap-16 py-10">
+      <main id="content" className="grid gap-14 py-8">
         <div className="grid items-center gap-10 lg:grid-cols-[minmax(0,5fr)_minmax(0,4fr)]">
           <div className="grid gap-6">
             <h1 className="text-4xl leading-tight font-medium tracking-tight sm:text-5xl">
@@ -54,6 +55,7 @@ export default async function FrontPage() {
           </div>
           <WinnowingFigure />
         </div>
+        <DemoAnswer />
         <dl className="grid gap-8 sm:grid-cols-2 lg:grid-cols-4">
           {promises.map(([term, says]) => (
             <div key={term} className="border-chaff border-t-2 pt-3">

@@ -1,7 +1,7 @@
 import Link from 'next/link';
 import type { ReactNode } from 'react';
 import type { Actor } from '@/src/access/actor';
-import { Navigation } from '@/src/ui/navigation';
+import { Navigation, NavigationMenu } from '@/src/ui/navigation';
 import { PersonMenu } from '@/src/ui/person-menu';
 import { ThemeSwitch } from '@/src/ui/theme-switch';
 import { Wordmark } from '@/src/ui/wordmark';
@@ -33,6 +33,7 @@ export default async function ShellLayout({ children }: { children: ReactNode })
           </div>
         </div>
         <Navigation items={places} />
+        <NavigationMenu items={places} />
       </header>
       <main id="content" className="min-w-0 pb-16">
         {children}

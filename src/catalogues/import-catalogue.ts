@@ -31,12 +31,12 @@ const rejectColumns = ['catalogue_id', 'ordinal', 'line', 'column_name', 'value'
  */
 export async function importCatalogue(em: EntityManager, id: string, limits: ImportLimits, progress: ImportProgress) {
   const catalogue = await em.findOneOrFail(Catalogue, { id, status: 'checking' });
-  const materials = await knownMaterials(em, catalogue.group.id);
+  const known = await knownMaterials(em, catalogue.group.id);
   const rejects: RejectRow[] = [];
   await em.transactional(async (tx) => {
     const outcome = await tx
       .transactional(async (inner) => {
-        const reading = await copyGrains(inner, em, catalogue, { ...materials, ...limits }, rejects, progress);
+        const reading = await copyGrains(inner, em, catalogue, { knownMaterials: known, ...limits }, rejects, progress);
         if (reading.rejected > 0 && catalogue.onInvalidRows === 'refuse') throw new Refused(reading);
         return { reading, failure: reading.accepted === 0 ? 'No row could be accepted.' : null };
       })

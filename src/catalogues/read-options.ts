@@ -7,8 +7,6 @@ export type ReadOptions = {
   defaults?: { densityGCm3?: number; material?: string };
   /** Slug or alias, in lower case -> slug. */
   knownMaterials: ReadonlyMap<string, string>;
-  /** By slug; used when the file has no density column at all and no default is given. */
-  materialDensityKgM3?: ReadonlyMap<string, number>;
   maxRows: number;
 };
 

@@ -21,7 +21,6 @@ export function rowChecker(plan: ColumnPlan, width: number, options: ReadOptions
   const [label, count] = [column('label'), column('count')];
   const readMaterial = materialReader(column('material'), options);
   const defaultDensity = defaultDensityKgM3(options);
-  const densityOfMaterial = density ? undefined : options.materialDensityKgM3;
 
   return (cells: string[], line: number): GrainRow | RejectRow[] => {
     const problems: RejectRow[] = [];
@@ -69,7 +68,7 @@ export function rowChecker(plan: ColumnPlan, width: number, options: ReadOptions
     const material = readMaterial(cells, refuse);
     if (problems.length > 0 || material === null) return problems;
 
-    const numbers = settleGrain(measured, defaultDensity ?? densityOfMaterial?.get(material) ?? null);
+    const numbers = settleGrain(measured, defaultDensity);
     if ('reason' in numbers) {
       const at = column(numbers.field);
       refuse(at?.header ?? null, at ? cells[at.index] : null, numbers.reason);

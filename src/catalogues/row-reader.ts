@@ -73,7 +73,8 @@ export class RowReader {
       planColumns(cells, this.options.mapping, line),
     );
     this.columns = planned.columns;
-    this.#warnings = [...planned.warnings, ...checkRequiredColumns(planned.columns, this.options, line)];
+    checkRequiredColumns(planned.columns, this.options, line);
+    this.#warnings = planned.warnings;
     this.#check = rowChecker(planned.columns, cells.length, this.options, this.delimiter);
     this.#width = cells.length;
     this.#headerLine = line;

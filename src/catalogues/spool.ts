@@ -1,6 +1,6 @@
 import { createHash, randomUUID } from 'node:crypto';
-import { createWriteStream } from 'node:fs';
-import { mkdir, rm } from 'node:fs/promises';
+import { createWriteStream, mkdirSync } from 'node:fs';
+import { rm } from 'node:fs/promises';
 import { join } from 'node:path';
 import { Transform, type Readable } from 'node:stream';
 import { pipeline } from 'node:stream/promises';
@@ -13,7 +13,8 @@ export type Spooled = { path: string; byteSize: number; sha256: string; remove()
  * database.
  */
 export async function spool(source: Readable, directory: string, limitBytes: number): Promise<Spooled> {
-  await mkdir(directory, { recursive: true });
+  // At once, without giving up the turn: a source that fails early must find us listening.
+  mkdirSync(directory, { recursive: true });
   const path = join(directory, randomUUID());
   const hash = createHash('sha256');
   let byteSize = 0;

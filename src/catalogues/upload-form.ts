@@ -44,6 +44,7 @@ export async function readUploadForm(
   }
   const fields: Record<string, string> = {};
   let received: Promise<{ file: Spooled; fileName: string }> | undefined;
+  let incoming: Readable | undefined;
   const form = parser(contentType ?? '');
   form.on('field', (name, value, nameCut, valueCut) => {
     if (nameCut || valueCut) form.destroy(new Refusal('tooLarge', `The field ${name.slice(0, 50)} is too long.`));
@@ -52,6 +53,7 @@ export async function readUploadForm(
   });
   form.on('file', (name, stream, fileName) => {
     if (name !== 'file') return void form.destroy(new Refusal('invalid', 'The file must be in the field file.'));
+    incoming = stream;
     received = spool(stream, directory, limitBytes).then((file) => ({
       file,
       fileName: (fileName || 'catalogue.csv').slice(0, 255),
@@ -66,6 +68,7 @@ export async function readUploadForm(
   try {
     await pipeline(Readable.fromWeb(body as Parameters<typeof Readable.fromWeb>[0]), form);
   } catch (error) {
+    incoming?.destroy(error instanceof Error ? error : undefined);
     await received?.then(
       ({ file }) => file.remove(),
       () => undefined,

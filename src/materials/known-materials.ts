@@ -1,13 +1,9 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import { currentMaterials, type CurrentMaterial } from './current-materials';
 
-/** Slug or alias in lower case -> slug, and the density of each slug: what the reader of a catalogue needs to know. */
-export async function knownMaterials(em: EntityManager, groupId: string) {
-  const current = await currentMaterials(em, groupId);
-  return {
-    knownMaterials: slugByName(current),
-    materialDensityKgM3: new Map([...current].map(([slug, version]) => [slug, version.densityKgM3])),
-  };
+/** Slug, name or alias in lower case -> slug: what the reader of a catalogue needs to know. */
+export async function knownMaterials(em: EntityManager, groupId: string): Promise<Map<string, string>> {
+  return slugByName(await currentMaterials(em, groupId));
 }
 
 export function slugByName(current: Map<string, CurrentMaterial>): Map<string, string> {

@@ -34,6 +34,12 @@ const rules = {
   clear: { firstLevel: 7, lastLevel: 9, relativeTolerance: 2.5e-4 },
 } satisfies Record<string, DoublingRule>;
 
+/** The series of a coated sphere costs so much more that a clear mantle gets fewer wavelengths, and a wider error bound. */
+const coatedRules = {
+  ...rules,
+  clear: { firstLevel: 5, lastLevel: 7, relativeTolerance: 5e-4 },
+} satisfies typeof rules;
+
 const rayLevels = { opaque: 2, hazy: 3, clear: 6 };
 
 /** Clarity of a recipe in a spectrum, from the optical constants of what light meets first. */
@@ -57,10 +63,11 @@ export function clarityOf(recipe: OpticsRecipe, spectrum: Spectrum): Clarity {
     return hazy > SHARE_THAT_COUNTS ? 'hazy' : 'opaque';
   };
   const kind = kindAt(0);
+  const own = recipe.mantle === undefined ? rules : coatedRules;
   return {
     kind,
-    ruleAt: (radiusM) => rules[kindAt(radiusM)],
-    lastLevel: rules[kind].lastLevel,
+    ruleAt: (radiusM) => own[kindAt(radiusM)],
+    lastLevel: Math.max(own[kind].lastLevel, own.opaque.lastLevel),
     rayLevel: rayLevels[kind],
   };
 }

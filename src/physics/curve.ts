@@ -1,3 +1,4 @@
+import { coatedTail } from './coated-tail';
 import { curveNotes } from './curve-notes';
 import { grainSampler } from './grain-sampler';
 import { largeGrainTail } from './large-grain-tail';
@@ -48,6 +49,7 @@ export class CurveCancelled extends Error {
 /** Median wavelength of a 5772 K black body; the tail's start is given for it and scales with the spectrum's own. */
 const REFERENCE_MEDIAN_M = 0.711e-6;
 const TAIL_START_M = { opaque: 80e-6, hazy: 120e-6, clear: 120e-6 };
+const COATED_TAIL_START_M = 40e-6;
 const TAIL_ALIGNMENT = 16;
 const LEAST_ERROR = { opaque: 1e-4, hazy: 2e-4, clear: 1e-3 };
 
@@ -56,7 +58,7 @@ const LEAST_ERROR = { opaque: 1e-4, hazy: 2e-4, clear: 1e-3 };
  *
  * Mie means on nested wavelength grids up to s = 80 um (120 um if not opaque; at 5772 K, scaled with the median wavelength), beyond that ray
  * optics plus inverse powers of s fitted to the Mie means below; radii are added where the spline through the known ones
- * misses a new one. Error: 1e-4 for absorbing, 1e-3 for transparent materials, see `relativeErrorBound`. Effective
+ * misses a new one. Error: 1e-4 for absorbing, 1e-3 for transparent materials (2e-3 under a mantle), see `relativeErrorBound`. Effective
  * temperatures 2000 to 60 000 K. Sources: Bohren & Huffman (1983), chapter 4; Burns, Lamy & Soter (1979), Icarus 40, 1.
  */
 export function buildCurve(recipe: OpticsRecipe, spectrum: Spectrum, options: BuildOptions = {}): Curve {
@@ -64,13 +66,16 @@ export function buildCurve(recipe: OpticsRecipe, spectrum: Spectrum, options: Bu
   const grid = spectralGrid(spectrum, clarity.lastLevel + 1, narrowFeatures(recipe));
   const sampler = grainSampler(recipe, grid.wavelengthM);
   const median = medianWavelengthM(grid);
-  const tailIndex = indexOfRadius((TAIL_START_M[clarity.kind] * median) / REFERENCE_MEDIAN_M, TAIL_ALIGNMENT);
+  const tailStartM = sampler.isCoated ? COATED_TAIL_START_M : TAIL_START_M[clarity.kind];
+  const tailIndex = indexOfRadius((tailStartM * median) / REFERENCE_MEDIAN_M, TAIL_ALIGNMENT);
 
   const mie = mieNodes(sampler, grid, clarity, tailIndex, (share) => {
     if (options.isCancelled?.() === true) throw new CurveCancelled();
     options.onProgress?.(share);
   });
-  const tail = largeGrainTail(sampler, grid, clarity, mie.nodes, tailIndex);
+  const tail = sampler.isCoated
+    ? coatedTail(sampler, grid, clarity, tailIndex)
+    : largeGrainTail(sampler, grid, clarity, mie.nodes, tailIndex);
   const nodes = [...mie.nodes, ...tail.nodes];
   const share = shareOutside(grid, validUm(recipe));
   options.onProgress?.(1);

@@ -65,7 +65,8 @@ export function mieNodes(
       const expected = Math.abs(lnQ(middle.qPr) - predict(middle.index)) / GAIN_OF_HALVING;
       const noise = middle.relativeError / 2;
       const missed = Math.abs(lnQ(middle.qAbs) - predictAbsorption(middle.index)) / GAIN_OF_HALVING;
-      const isRough = expected > Math.max(INTERPOLATION_TOLERANCE[clarity.kind], noise) || missed > ABSORPTION_TOLERANCE;
+      const isRough =
+        expected > Math.max(INTERPOLATION_TOLERANCE[clarity.kind], noise) || missed > ABSORPTION_TOLERANCE;
       if (isRough && width / 2 > LAST_STEP) next.push(left, left + width / 2);
       else interpolationError = Math.max(interpolationError, expected);
     }

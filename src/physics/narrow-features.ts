@@ -1,6 +1,7 @@
 import { brentRoot } from './brent';
 import { dielectricFunction, EV_UM } from './materials';
-import type { DielectricModel, OpticsRecipe } from './optics';
+import { epsToIndex, indexToEps, porousIndex } from './mixtures';
+import type { IndexModel, OpticsRecipe } from './optics';
 import { CURVE_RADIUS_MIN_M } from './radius-grid';
 
 /** A place in the spectrum where the optical constants change within a small relative step of wavelength. */
@@ -23,23 +24,29 @@ const SHIFT_IN_WIDTHS = 5;
  * & Huffman 1983, section 12.2) where those are narrow: wavelength grids crowd there, since a grain small against the
  * wavelength may owe most of its absorption to one such place. Without it 1 nm grains of one library material err by 30 %.
  */
-export function narrowFeatures({ core, mantle }: OpticsRecipe): NarrowFeature[] {
-  const components = [...core.components, ...(mantle?.optics.components ?? [])];
-  return withoutRepeats(components.flatMap(({ model }) => (model.kind === 'oscillators' ? featuresOf(model) : [])));
+export function narrowFeatures({ core, porosity = 0, mixing = 'bruggeman', mantle }: OpticsRecipe): NarrowFeature[] {
+  const voids = ({ model }: { model: IndexModel }) => featuresOf(model, (eps) => porousEps(eps, porosity, mixing));
+  const solid = ({ model }: { model: IndexModel }) => featuresOf(model, (eps) => eps);
+  return withoutRepeats([...core.components.flatMap(voids), ...(mantle?.optics.components.flatMap(solid) ?? [])]);
 }
 
-function featuresOf(model: DielectricModel): NarrowFeature[] {
+type Eps = [number, number];
+
+function featuresOf(model: IndexModel, mixed: (solid: Eps) => Eps): NarrowFeature[] {
+  if (model.kind !== 'oscillators') return [];
+  const epsAt = (energyEv: number) => mixed(dielectricFunction(model, energyEv));
   return [...model.gauss, ...model.lorentz]
     .flatMap(([, centreEv, widthEv]) => [
       { wavelengthM: wavelengthOf(centreEv), relativeWidth: widthEv / centreEv },
-      ...sphereResonance(model, centreEv, widthEv / centreEv),
+      ...sphereResonances(epsAt, centreEv, widthEv / centreEv),
     ])
     .filter(({ relativeWidth }) => relativeWidth < NARROW);
 }
 
-/** First rise of Re eps through -2 above an oscillator, as wide as Im eps makes it; none when Re eps stays above -2. */
-function sphereResonance(model: DielectricModel, centreEv: number, relativeWidth: number): NarrowFeature[] {
-  const excess = (energyEv: number) => dielectricFunction(model, energyEv)[0] + 2;
+/** Rises of Re eps through -2 above an oscillator, as wide as Im eps makes them; voids may add one of their own. */
+function sphereResonances(epsAt: (energyEv: number) => Eps, centreEv: number, relativeWidth: number): NarrowFeature[] {
+  const excess = (energyEv: number) => epsAt(energyEv)[0] + 2;
+  const resonances: NarrowFeature[] = [];
   const reach = Math.log1p(Math.max(LARGEST_SHIFT / relativeWidth, SHIFT_IN_WIDTHS));
   const energyAt = (step: number) => centreEv * (1 + relativeWidth * Math.expm1((step / SCAN_STEPS) * reach));
   let low = energyAt(0);
@@ -50,15 +57,19 @@ function sphereResonance(model: DielectricModel, centreEv: number, relativeWidth
     if (isBelow && isAbove) {
       const energyEv = brentRoot(excess, low, high, 1e-12 * centreEv);
       const slope = excess(energyEv * (1 + 1e-6)) / 1e-6;
-      const width = dielectricFunction(model, energyEv)[1] / slope;
+      const width = epsAt(energyEv)[1] / slope;
       const wavelengthM = wavelengthOf(energyEv);
       const smallestX = (2 * Math.PI * CURVE_RADIUS_MIN_M) / wavelengthM;
-      return [{ wavelengthM, relativeWidth: Math.max(width, SHIFT_PER_X2 * smallestX ** 2) }];
+      resonances.push({ wavelengthM, relativeWidth: Math.max(width, SHIFT_PER_X2 * smallestX ** 2) });
     }
     low = high;
     isBelow = !isAbove;
   }
-  return [];
+  return resonances;
+}
+
+function porousEps(solid: Eps, porosity: number, mixing: 'bruggeman' | 'maxwellGarnett'): Eps {
+  return porosity === 0 ? solid : indexToEps(porousIndex(epsToIndex(solid), porosity, mixing));
 }
 
 /** Several oscillators may lead to the same resonance. */

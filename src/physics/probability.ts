@@ -44,26 +44,30 @@ export function prepareProbability(
     const densityBelow = densityDistribution(densityKgM3, densitySigmaKgM3);
     if (radiusSigmaM === 0) return densityBelow(Math.exp(lnThreshold(lnRadius)));
     const lnSigma = lnSigmaOf(radiusM, radiusSigmaM);
+    windowsAt ??= preparedWindows(lnThreshold);
     if (densitySigmaKgM3 === 0) {
-      windowsAt ??= preparedWindows(lnThreshold);
       return windowsAt(Math.log(densityKgM3)).reduce(
         (sum, [lo, hi]) => sum + normalCdf((hi - lnRadius) / lnSigma) - normalCdf((lo - lnRadius) / lnSigma),
         0,
       );
     }
     const integrand = (z: number) => normalDensity(z) * densityBelow(Math.exp(lnThreshold(lnRadius + lnSigma * z)));
-    return overPanels(integrand, lnSigma);
+    const crossings = windowsAt(Math.log(densityKgM3)).flat();
+    return overPanels(integrand, lnSigma, crossings.map((at) => (at - lnRadius) / lnSigma));
   };
 }
 
-/** Narrow windows must not fall between the nodes: panels are narrow in ln s, too. */
-function overPanels(integrand: (z: number) => number, lnSigma: number): number {
+/**
+ * Panels are narrow in ln s, so that narrow windows do not fall between the nodes, and end where grains of the given density
+ * change their fate: with a small density error that is a step, which a panel with no node beyond it would miss.
+ */
+function overPanels(integrand: (z: number) => number, lnSigma: number, steps: number[]): number {
   const panels = Math.max(FEWEST_PANELS, Math.ceil((2 * REACH * lnSigma) / WIDEST_PANEL_LN));
-  const width = (2 * REACH) / panels;
+  const even = Array.from({ length: panels + 1 }, (_, panel) => -REACH + (2 * REACH * panel) / panels);
+  const edges = [...even, ...steps.filter((z) => Math.abs(z) < REACH)].sort((a, b) => a - b);
   let sum = 0;
-  for (let panel = 0; panel < panels; panel++) {
-    const low = -REACH + panel * width;
-    sum += adaptiveIntegral(integrand, low, low + width, TOLERANCE / panels);
+  for (let index = 1; index < edges.length; index++) {
+    sum += adaptiveIntegral(integrand, edges[index - 1], edges[index], TOLERANCE / panels);
   }
   return Math.min(1, Math.max(0, sum));
 }

@@ -17,7 +17,7 @@ export function CatalogueTable({ items }: { items: readonly CatalogueItem[] }) {
               <th
                 key={column}
                 scope="col"
-                className={`py-1.5 pr-4 font-medium ${numeric.has(column) ? 'text-right' : 'text-left'}`}
+                className={`py-1.5 pr-8 font-medium ${numeric.has(column) ? 'text-right' : 'text-left'}`}
               >
                 {column}
               </th>
@@ -27,24 +27,24 @@ export function CatalogueTable({ items }: { items: readonly CatalogueItem[] }) {
         <tbody>
           {items.map((item) => (
             <tr key={item.id} className="border-line hover:bg-panel border-t">
-              <th scope="row" className="max-w-72 py-2.5 pr-4 text-left font-medium">
+              <th scope="row" className="max-w-72 py-2.5 pr-8 text-left font-medium">
                 <Link href={`/catalogues/${item.id}`} className="block truncate hover:underline">
                   {item.name}
                 </Link>
               </th>
-              <td className="py-2.5 pr-4">
+              <td className="py-2.5 pr-8">
                 <StatusBadge status={item.status} />
               </td>
-              <td className="py-2.5 pr-4 text-right font-mono tabular-nums">
+              <td className="py-2.5 pr-8 text-right font-mono tabular-nums">
                 {item.status === 'ready' ? item.rows.accepted.toLocaleString('en-US') : '—'}
               </td>
-              <td className="py-2.5 pr-4 text-right font-mono tabular-nums">
+              <td className="py-2.5 pr-8 text-right font-mono tabular-nums">
                 {item.rows.rejected.toLocaleString('en-US')}
               </td>
-              <td className="max-w-60 truncate py-2.5 pr-4">
+              <td className="max-w-60 truncate py-2.5 pr-8">
                 {item.materials.map(({ material }) => material).join(', ') || '—'}
               </td>
-              <td className="py-2.5 pr-4">
+              <td className="py-2.5 pr-8">
                 <Moment iso={item.createdAt} />
               </td>
               <td className="py-2.5">{item.uploadedBy}</td>

@@ -23,7 +23,7 @@ export function DataTable<Row>({ caption, columns, rows, rowKey, minWidth = 'min
               <th
                 key={index}
                 scope="col"
-                className={`py-1.5 pr-5 font-medium ${column.isNumber ? 'text-right' : 'text-left'}`}
+                className={`py-1.5 pr-8 font-medium ${column.isNumber ? 'text-right' : 'text-left'}`}
               >
                 {column.header}
               </th>
@@ -35,11 +35,11 @@ export function DataTable<Row>({ caption, columns, rows, rowKey, minWidth = 'min
             <tr key={rowKey(row)} className="border-line hover:bg-panel border-t align-top">
               {columns.map((column, index) =>
                 index === 0 ? (
-                  <th key={index} scope="row" className="py-2.5 pr-5 text-left font-medium">
+                  <th key={index} scope="row" className="py-2.5 pr-8 text-left font-medium">
                     {column.show(row)}
                   </th>
                 ) : (
-                  <td key={index} className={`py-2.5 pr-5 ${align(column)}`}>
+                  <td key={index} className={`py-2.5 pr-8 ${align(column)}`}>
                     {column.show(row)}
                   </td>
                 ),

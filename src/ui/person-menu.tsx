@@ -1,22 +1,27 @@
 import Link from 'next/link';
 import { Button } from './button';
+import { Disclosure } from './disclosure';
 
 type Props = { name: string; groupName: string | null; role: string; signOut: () => Promise<void> };
 
-/** A disclosure that works without script: who is signed in, and the way out. */
+/** Who is signed in, for which group, and the way out. */
 export function PersonMenu({ name, groupName, role, signOut }: Props) {
   return (
-    <details className="group relative">
-      <summary className="hover:bg-line/50 flex min-h-10 list-none items-center gap-2 rounded-md px-2">
-        <span
-          className="bg-straw inline-flex size-7 items-center justify-center rounded-full text-sm font-medium text-[#12162a]"
-          aria-hidden="true"
-        >
-          {initials(name)}
-        </span>
-        <span className="max-w-40 truncate text-sm max-sm:sr-only">{name}</span>
-      </summary>
-      <div className="bg-panel border-line absolute right-0 z-30 mt-1 grid w-72 gap-3 rounded-lg border p-4 shadow-lg">
+    <Disclosure
+      summaryClass="hover:bg-line/50 flex min-h-11 items-center gap-2 rounded-md px-2"
+      summary={
+        <>
+          <span
+            className="bg-straw inline-flex size-7 items-center justify-center rounded-full text-sm font-medium text-[#12162a]"
+            aria-hidden="true"
+          >
+            {initials(name)}
+          </span>
+          <span className="max-w-40 truncate text-sm max-sm:sr-only">{name}</span>
+        </>
+      }
+    >
+      <div className="bg-panel border-line absolute right-0 z-30 mt-1 grid w-72 max-w-[calc(100vw-2rem)] gap-3 rounded-lg border p-4 shadow-lg">
         <div>
           <p className="font-medium">{name}</p>
           <p className="text-muted text-sm">
@@ -33,7 +38,7 @@ export function PersonMenu({ name, groupName, role, signOut }: Props) {
           </Button>
         </form>
       </div>
-    </details>
+    </Disclosure>
   );
 }
 

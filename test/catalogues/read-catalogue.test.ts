@@ -49,20 +49,8 @@ describe('reading a catalogue', () => {
     expect((await readText('radius_um\n1\n', { defaults })).accepted).toBe(1);
   });
 
-  test("without a density column each material's own density is taken, and the reader is told", async () => {
-    const materialDensityKgM3 = new Map([
-      ['astrosil', 3300],
-      ['water_ice', 917],
-    ]);
-    const read = await readAwkward('missing-density-column.csv', { materialDensityKgM3 });
-    expect(read.grains.map(({ densityKgM3 }) => densityKgM3)).toEqual([3300, 917]);
-    expect(read.warnings).toEqual([expect.objectContaining({ code: 'materialDensity' })]);
-  });
-
-  test('an empty cell in a density column does not take the density of the material', async () => {
-    const materialDensityKgM3 = new Map([['water_ice', 917]]);
-    const read = await readText('radius_um,density_g_cm3,material\n1,,ice\n', { materialDensityKgM3 });
-    expect(read.rejects).toEqual([expect.objectContaining({ column: 'density_g_cm3' })]);
+  test('without a density column and without a default the file is refused: no density is guessed', async () => {
+    await expect(readAwkward('missing-density-column.csv')).rejects.toMatchObject({ code: 'densityMissing' });
   });
 
   test('a mass and a density make a size: 10.47197551 pg of 2.5 g/cm3 are 1 um', async () => {

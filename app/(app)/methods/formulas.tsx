@@ -1,4 +1,5 @@
 import type { ReactNode } from 'react';
+import { IndexedText } from '@/src/ui/lowered-text';
 
 type Method = { name: string; formula: ReactNode; says: string; source: string };
 
@@ -20,7 +21,7 @@ const methods: Method[] = [
         Q<sub>pr</sub> = Q<sub>ext</sub> − g Q<sub>sca</sub>
       </>
     ),
-    says: 'From the Mie series with the complex refractive index at each wavelength; relative accuracy 1e-9 for size parameters up to 2000.',
+    says: 'From the Mie series with the complex refractive index at each wavelength; relative accuracy 10⁻⁹ for size parameters up to 2000.',
     source: 'Bohren & Huffman (1983), chapter 4',
   },
   {
@@ -30,7 +31,7 @@ const methods: Method[] = [
         ⟨Q<sub>pr</sub>⟩ = ∫ Q<sub>pr</sub> F<sub>λ</sub> dλ / ∫ F<sub>λ</sub> dλ
       </>
     ),
-    says: 'On nested wavelength grids until two differences have fallen below the tolerance: 1e-4 for absorbing materials, 1e-3 for transparent ones, where narrow resonances set the limit.',
+    says: 'On nested wavelength grids until two differences have fallen below the tolerance: 10⁻⁴ for absorbing materials, 10⁻³ for transparent ones, where narrow resonances set the limit.',
     source: 'Trapezoid rule in a smooth variable; error bound kept with every curve',
   },
   {
@@ -51,7 +52,7 @@ const methods: Method[] = [
       </>
     ),
     says: 'All crossings, found on 640 radii from 1 nm to 1 cm with every bend refined: none, one, a window, or several.',
-    source: "Brent's method in ln s, to 1e-10",
+    source: 'Brent (1973), chapter 4, in ln s to 10⁻⁹',
   },
   {
     name: 'Orbit after release',
@@ -98,7 +99,7 @@ const methods: Method[] = [
   {
     name: 'P(unbound)',
     formula: <>P = ∫ p(ln s) P(ρ ≤ f(s)) d ln s</>,
-    says: 'Radius lognormal about its value as the median, density normal above zero, independent; deterministic quadrature, error below 1e-5.',
+    says: 'Radius lognormal about its value as the median, density normal above zero, independent; deterministic quadrature, error below 10⁻⁵.',
     source: 'σ of ln s = √ln(1 + (σ_s/s)²)',
   },
   {
@@ -117,8 +118,12 @@ export function Formulas() {
           <dt className="font-medium">{name}</dt>
           <dd className="min-w-0">
             <p className="font-serif text-lg">{formula}</p>
-            <p className="mt-1">{says}</p>
-            <p className="text-muted mt-1 text-sm">{source}</p>
+            <p className="mt-1 max-w-prose">
+              <IndexedText text={says} />
+            </p>
+            <p className="text-muted mt-1 text-sm">
+              <IndexedText text={source} />
+            </p>
           </dd>
         </div>
       ))}

@@ -1,5 +1,6 @@
 import type { Metadata } from 'next';
 import { ENGINE_VERSION } from '@/src/physics/engine-version';
+import { IndexedText } from '@/src/ui/lowered-text';
 import { PageHeader } from '@/src/ui/page-header';
 import { RunSection } from '@/src/ui/run-section';
 import { cautions } from './cautions';
@@ -22,7 +23,9 @@ export default function MethodsPage() {
         <RunSection id="cautions" title="What to bear in mind">
           <ol className="grid max-w-3xl list-decimal gap-2 pl-6">
             {cautions.map((caution) => (
-              <li key={caution}>{caution}</li>
+              <li key={caution}>
+                <IndexedText text={caution} />
+              </li>
             ))}
           </ol>
         </RunSection>

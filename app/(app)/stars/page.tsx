@@ -4,6 +4,7 @@ import type { StarItem } from '@/src/stars/schema';
 import { DataTable, type DataColumn } from '@/src/ui/data-table';
 import { PageHeader } from '@/src/ui/page-header';
 import { exactText } from '@/src/ui/run-figures';
+import { sentence } from '@/src/ui/sentence';
 import { pageActor, pageEm } from '@/src/web/page';
 
 export const metadata: Metadata = { title: 'Stars' };
@@ -49,7 +50,7 @@ const columns: DataColumn<StarItem>[] = [
   },
   { header: 'Spectrum', show: (star) => (star.spectrum === 'blackbody' ? 'black body' : 'table') },
   { header: 'Version', isNumber: true, show: (star) => star.version },
-  { header: 'Source', show: (star) => <Source citation={star.citation} note={star.note} /> },
+  { header: 'Source and remarks', show: (star) => <Source citation={star.citation} note={star.note} /> },
 ];
 
 export default async function StarsPage() {
@@ -85,7 +86,7 @@ function Source({ citation, note }: { citation: string; note: string }) {
   return (
     <span className="block max-w-md text-xs">
       {citation}
-      {note && <span className="text-muted mt-1 block">{note}</span>}
+      {note && <span className="text-muted mt-1 block">{sentence(note)}</span>}
     </span>
   );
 }

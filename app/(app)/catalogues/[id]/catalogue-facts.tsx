@@ -10,7 +10,7 @@ export function CatalogueFacts({ catalogue }: { catalogue: CatalogueItem }) {
       `${number(rows.accepted + rows.rejected + rows.blank)} = ${number(rows.accepted)} accepted + ${number(rows.rejected)} rejected + ${number(rows.blank)} blank`,
     ],
     ['Materials', materials.map(({ material, grains }) => `${material} (${number(grains)})`).join(', ') || '—'],
-    ['Rows that are not valid', onInvalidRows === 'refuse' ? 'refuse the catalogue' : 'are left out'],
+    ['Rule for rows that are not valid', onInvalidRows === 'refuse' ? 'refuse the whole catalogue' : 'leave them out'],
     ['Size of the file', `${number(byteSize)} bytes`],
     [
       'SHA-256 of the file',

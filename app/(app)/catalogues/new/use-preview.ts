@@ -9,6 +9,16 @@ const previewBytes = 256 * 1024;
 
 export type PreviewDefaults = { densityGCm3?: number; material?: string };
 
+const unreadable: CataloguePreview = {
+  delimiter: null,
+  columns: [],
+  rows: [],
+  fault: 'The file could not be opened. It may have been moved or changed: choose it again.',
+  accepted: [],
+  problems: [],
+  warnings: [],
+};
+
 /** What the first 256 KB of the chosen file would become; read anew when the mapping or a default changes. */
 export function usePreview(
   file: File | null,
@@ -20,19 +30,20 @@ export function usePreview(
   useEffect(() => {
     if (!file) return;
     let isStale = false;
-    void file
-      .slice(0, previewBytes)
-      .arrayBuffer()
-      .then((buffer) => {
-        if (isStale) return;
-        const found = previewCatalogue(new Uint8Array(buffer), {
-          mapping: Object.keys(mapping).length > 0 ? mapping : undefined,
-          defaults,
-          ...namesOf(materials),
-          isWholeFile: file.size <= previewBytes,
-        });
-        setPreview({ of: file, found });
-      });
+    const show = (found: CataloguePreview) => {
+      if (!isStale) setPreview({ of: file, found });
+    };
+    const options = {
+      mapping: Object.keys(mapping).length > 0 ? mapping : undefined,
+      defaults,
+      knownMaterials: namesOf(materials),
+      isWholeFile: file.size <= previewBytes,
+    };
+    const beginning = file.slice(0, previewBytes).arrayBuffer();
+    void beginning.then(
+      (buffer) => show(previewCatalogue(new Uint8Array(buffer), options)),
+      () => show(unreadable),
+    );
     return () => {
       isStale = true;
     };
@@ -40,14 +51,11 @@ export function usePreview(
   return preview && preview.of === file ? preview.found : null;
 }
 
-function namesOf(materials: readonly MaterialItem[]) {
+function namesOf(materials: readonly MaterialItem[]): Map<string, string> {
   const knownMaterials = new Map<string, string>();
   for (const { slug, name, aliases } of materials) {
     for (const alias of [name, ...aliases]) knownMaterials.set(alias.toLowerCase(), slug);
   }
   for (const { slug } of materials) knownMaterials.set(slug, slug);
-  return {
-    knownMaterials,
-    materialDensityKgM3: new Map(materials.map(({ slug, densityGCm3 }) => [slug, densityGCm3 * 1000])),
-  };
+  return knownMaterials;
 }
