@@ -31,7 +31,7 @@ export function coatedTail(
   const nodes: CurveNode[] = [];
   const added: Added[] = [];
   let relativeError = 0;
-  for (let index = tailIndex + STEP; ; index += STEP) {
+  for (let index = tailIndex + STEP; index < CURVE_INTERVALS + STEP; index += STEP) {
     const radiusM = radiusOfIndex(Math.min(index, CURVE_INTERVALS));
     const surface = rayMean(rays, radiusM);
     if (added.length < MIE_STEPS) {
@@ -46,8 +46,8 @@ export function coatedTail(
       qPr: surface.qPr + pressure,
       qAbs: surface.qAbs + absorption,
     });
-    if (index >= CURVE_INTERVALS) return { nodes, relativeError };
   }
+  return { nodes, relativeError };
 }
 
 /** One step further: what falls as 1/s changes by `DECAY` times the last change. */
