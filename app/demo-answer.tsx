@@ -21,9 +21,17 @@ export async function DemoAnswer() {
         An example: invented grains, released on a circular orbit
       </h2>
       <p className="max-w-4xl font-serif text-2xl leading-snug text-balance">
-        {headline.map((part) => (typeof part === 'string' ? part : part.figure)).join('')}
+        {headline.map((part, place) =>
+          typeof part === 'string' ? (
+            part
+          ) : (
+            <span key={place} className="whitespace-nowrap">
+              {part.figure}
+            </span>
+          ),
+        )}
       </p>
-      <ul className="grid gap-1 font-serif text-lg">
+      <ul className="grid gap-1 font-serif text-lg" aria-label="Unbound radii">
         {materials.map(({ material, text }) => (
           <li key={material}>{text}</li>
         ))}

@@ -1,5 +1,6 @@
 export { Catalogue } from './catalogue';
 export { CatalogueChunk } from './catalogue-chunk';
+export { ChangeRecord } from './change-record';
 export { Curve } from './curve';
 export { Grain } from './grain';
 export { Material } from './material';

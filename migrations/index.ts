@@ -1,5 +1,9 @@
 import type { MigrationObject } from '@mikro-orm/core';
+import { ChangeRecordTable } from './m20261201-change-record';
 import { House } from './m20261201-house';
 
 /** In order; a migration that was released is never changed. */
-export const migrations: MigrationObject[] = [{ name: 'm20261201-house', class: House }];
+export const migrations: MigrationObject[] = [
+  { name: 'm20261201-house', class: House },
+  { name: 'm20261201a-change-record', class: ChangeRecordTable },
+];

@@ -4,6 +4,7 @@ import { Catalogue, CatalogueChunk } from '@/entities';
 import type { CatalogueDefaults, CatalogueMapping, InvalidRowRule } from '@/entities/catalogue';
 import type { Actor } from '@/src/access/actor';
 import { demand } from '@/src/access/policy';
+import { recordChange } from '@/src/audit/record-change';
 import { Refusal } from '@/src/errors';
 import { enqueue, queues } from '@/src/queue';
 import type { Spooled } from './spool';
@@ -42,6 +43,12 @@ export async function receiveCatalogue(em: EntityManager, actor: Actor, upload: 
       materials: [],
     });
     await tx.flush();
+    recordChange(tx, actor, {
+      action: 'catalogue.upload',
+      target: { kind: 'catalogue', id: catalogue.id, name: upload.name },
+      groupId: actor.groupId,
+      after: { fileName: upload.fileName, sha256: file.sha256 },
+    });
     let ordinal = 0;
     for await (const bytes of createReadStream(file.path, { highWaterMark: chunkBytes })) {
       await tx.insert(CatalogueChunk, { catalogue: catalogue.id, ordinal: ordinal++, bytes: bytes as Buffer });

@@ -3,6 +3,7 @@ import { Catalogue, Run } from '@/entities';
 import type { RunInputs } from '@/entities/run-inputs';
 import type { Actor } from '@/src/access/actor';
 import { demand, ofOwnGroup } from '@/src/access/policy';
+import { recordChange } from '@/src/audit/record-change';
 import { Refusal } from '@/src/errors';
 import { ENGINE_VERSION } from '@/src/physics/engine-version';
 import { enqueue, queues } from '@/src/queue';
@@ -30,6 +31,12 @@ export async function requestRun(
       engineVersion: ENGINE_VERSION,
     });
     await tx.flush();
+    recordChange(tx, actor, {
+      action: 'run.request',
+      target: { kind: 'run', id: run.id, name: run.name },
+      groupId: actor.groupId,
+      after: { catalogue: catalogue.name, star: inputs.star.name },
+    });
     await enqueue(tx, queues.executeRun, run.id);
     return { id: run.id, status: run.status };
   });

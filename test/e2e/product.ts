@@ -27,7 +27,7 @@ export default async function setup(project: TestProject) {
   const port = await freePort();
   const env = {
     ...process.env,
-    NODE_ENV: 'production',
+    NODE_ENV: 'production' as const,
     DATABASE_URL: url,
     PUBLIC_URL: `http://localhost:${port}`,
     CHAFFLINE_SECRET: 'a secret for tests alone, of thirty-two characters and more',

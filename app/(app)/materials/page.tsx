@@ -2,7 +2,7 @@ import type { Metadata } from 'next';
 import { listMaterials } from '@/src/materials/find-materials';
 import type { MaterialItem } from '@/src/materials/schema';
 import { DataTable, type DataColumn } from '@/src/ui/data-table';
-import { ChemicalFormula } from '@/src/ui/lowered-text';
+import { ChemicalFormula, IndexedText } from '@/src/ui/lowered-text';
 import { PageHeader } from '@/src/ui/page-header';
 import { exactText } from '@/src/ui/run-figures';
 import { sentence, withMicroSign } from '@/src/ui/sentence';
@@ -39,7 +39,11 @@ const columns: DataColumn<MaterialItem>[] = [
       <span className="block max-w-md text-xs">
         {withMicroSign(citation)}
         <span className="text-muted mt-1 block">{sentence(`Density: ${densitySource}`)}</span>
-        {note && <span className="text-muted mt-1 block">{sentence(note)}</span>}
+        {note && (
+          <span className="text-muted mt-1 block">
+            <IndexedText text={sentence(note)} />
+          </span>
+        )}
       </span>
     ),
   },

@@ -6,8 +6,7 @@ import type { GridColumn, GridFilter } from '@/src/ui/grid/grid-column';
 import { ServerGrid } from '@/src/ui/grid/server-grid';
 
 const columns: GridColumn[] = [
-  { field: 'ordinal', header: 'No.', kind: 'count', widthPx: 84 },
-  { field: 'line', header: 'Line', kind: 'count', widthPx: 90 },
+  { field: 'line', header: 'Line', kind: 'count', widthPx: 96 },
   { field: 'label', header: 'Label', kind: 'text', widthPx: 140 },
   { field: 'radiusUm', header: 'Radius', unit: 'µm', kind: 'number', widthPx: 140 },
   { field: 'radiusSigmaUm', header: 'σ of radius', unit: 'µm', kind: 'number', widthPx: 160 },

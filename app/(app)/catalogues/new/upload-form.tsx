@@ -40,13 +40,11 @@ export function UploadForm({ materials, limitBytes }: Props) {
     <form onSubmit={submit} noValidate className="grid max-w-4xl gap-8" aria-label="New catalogue">
       <div className="grid gap-3">
         <FileDrop file={draft.file} problem={wasTried || draft.file ? problems.file : undefined} onChoose={choose} />
-        <div className="flex flex-wrap gap-x-6 gap-y-1">
-          <PasteTable onChoose={choose} />
-          <ColumnHelp />
+        <PasteTable onChoose={choose} />
+        <ColumnHelp />
+        <div role="status" className="not-empty:mt-3">
+          {preview && <PreviewReport preview={preview} />}
         </div>
-      </div>
-      <div role="status" className="empty:-mt-8">
-        {preview && <PreviewReport preview={preview} />}
       </div>
       {preview && preview.columns.length > 0 && preview.columns.length <= mostColumnsShown && (
         <section className="grid gap-3" aria-labelledby="columns">
@@ -58,7 +56,6 @@ export function UploadForm({ materials, limitBytes }: Props) {
       )}
       <NameAndDefaults draft={draft} problems={problems} wasTried={wasTried} materials={materials} onChange={change} />
       <InvalidRowsChoice value={draft.invalidRows} onChange={(invalidRows) => change({ invalidRows })} />
-      <UploadReport state={state} />
       <div className="flex flex-wrap items-center gap-3">
         <Button type="submit" variant="primary" disabled={isBusy}>
           Upload and check
@@ -68,6 +65,7 @@ export function UploadForm({ materials, limitBytes }: Props) {
           {wasTried && Object.values(problems)[0]}
         </p>
       </div>
+      <UploadReport state={state} />
     </form>
   );
 }
