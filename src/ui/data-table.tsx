@@ -12,7 +12,8 @@ type Props<Row> = {
 
 /** A plain table that scrolls inside itself on narrow screens; its first column names the row. */
 export function DataTable<Row>({ caption, columns, rows, rowKey, minWidth = 'min-w-[52rem]' }: Props<Row>) {
-  const align = (column: DataColumn<Row>) => (column.isNumber ? 'text-right font-mono tabular-nums' : 'text-left');
+  const align = (column: DataColumn<Row>) =>
+    column.isNumber ? 'text-right font-mono whitespace-nowrap tabular-nums' : 'text-left';
   return (
     <div className="overflow-x-auto" tabIndex={0} role="region" aria-label={`Table: ${caption}`}>
       <table className={`w-full ${minWidth} text-sm`}>

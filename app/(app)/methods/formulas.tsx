@@ -114,7 +114,10 @@ export function Formulas() {
   return (
     <dl className="grid gap-6">
       {methods.map(({ name, formula, says, source }) => (
-        <div key={name} className="border-line grid gap-x-8 gap-y-1 border-t pt-4 first:border-t-0 first:pt-0 md:grid-cols-[12rem_minmax(0,1fr)]">
+        <div
+          key={name}
+          className="border-line grid gap-x-8 gap-y-1 border-t pt-4 first:border-t-0 first:pt-0 md:grid-cols-[12rem_minmax(0,1fr)]"
+        >
           <dt className="font-medium">{name}</dt>
           <dd className="min-w-0">
             <p className="font-serif text-lg">{formula}</p>

@@ -62,7 +62,7 @@ export function uploadProblems(
 function fileProblem(file: File | null, preview: CataloguePreview | null, limitBytes: number): string | undefined {
   if (!file) return 'Choose a file first.';
   if (file.size > limitBytes) return `The file has ${sizeWords(file.size)}; ${sizeWords(limitBytes)} is the most.`;
-  return preview?.fault ? 'The file cannot be read as it is: see below.' : undefined;
+  return preview?.fault ? 'The file cannot be read as it is.' : undefined;
 }
 
 export function uploadForm(draft: UploadDraft, file: File): FormData {

@@ -39,7 +39,11 @@ export function UploadForm({ materials, limitBytes }: Props) {
   return (
     <form onSubmit={submit} noValidate className="grid max-w-4xl gap-8" aria-label="New catalogue">
       <div className="grid gap-3">
-        <FileDrop file={draft.file} problem={wasTried || draft.file ? problems.file : undefined} onChoose={choose} />
+        <FileDrop
+          file={draft.file}
+          problem={(wasTried || draft.file) && !preview?.fault ? problems.file : undefined}
+          onChoose={choose}
+        />
         <PasteTable onChoose={choose} />
         <ColumnHelp />
         <div role="status" className="not-empty:mt-3">
@@ -49,7 +53,7 @@ export function UploadForm({ materials, limitBytes }: Props) {
       {preview && preview.columns.length > 0 && preview.columns.length <= mostColumnsShown && (
         <section className="grid gap-3" aria-labelledby="columns">
           <h2 id="columns" className="text-xl">
-            Columns
+            Mapping of the columns
           </h2>
           <ColumnChoices preview={preview} mapping={draft.mapping} onChange={(mapping) => change({ mapping })} />
         </section>
