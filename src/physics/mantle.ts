@@ -4,6 +4,8 @@ import { G, mieInto, Q_ABS, Q_EXT, Q_PR, Q_SCA, type MieEfficiencies } from './m
 import { scaledPsi } from './mie-psi';
 
 const EXTRA_TERMS = 3;
+/** Below it the ratios underflow; the small-particle laws hold to 1e-11 there. */
+const SMALLEST_SERIES_X = 1e-6;
 /** As in the homogeneous sphere: below it psi_n is run downwards. */
 const LARGEST_DOWNWARD_PSI_X = 3;
 
@@ -79,6 +81,7 @@ export function coatedEfficiencies(
 export function coatedInto(out: Float64Array, xCore: number, xTotal: number, core: Complex, mantle: Complex): void {
   if (xCore >= xTotal || (core[0] === mantle[0] && core[1] === mantle[1]))
     return mieInto(out, xTotal, core[0], core[1]);
+  if (xTotal < SMALLEST_SERIES_X) return rayleighInto(out, xCore, xTotal, core, mantle);
   const terms = Math.ceil(xTotal + 4.05 * Math.cbrt(xTotal) + EXTRA_TERMS);
   const derivatives = layerDerivatives(xCore, xTotal, core, mantle, terms);
   const psiTable = xTotal < LARGEST_DOWNWARD_PSI_X ? scaledPsi(xTotal, terms) : null;
@@ -117,6 +120,17 @@ export function coatedInto(out: Float64Array, xCore: number, xTotal: number, cor
   out[Q_EXT] = out[Q_SCA] + out[Q_ABS];
   out[G] = out[Q_SCA] > 0 ? asymmetryTimesScattering / out[Q_SCA] : 0;
   out[Q_PR] = out[Q_EXT] - asymmetryTimesScattering;
+}
+
+/** Far below the wavelength absorption goes as x and scattering as x^4 (Bohren & Huffman, section 5.1), asymmetry as x^2. */
+function rayleighInto(out: Float64Array, xCore: number, xTotal: number, core: Complex, mantle: Complex): void {
+  const shrink = xTotal / SMALLEST_SERIES_X;
+  coatedInto(out, xCore / shrink, SMALLEST_SERIES_X, core, mantle);
+  out[Q_ABS] *= shrink;
+  out[Q_SCA] *= shrink ** 4;
+  out[G] *= shrink ** 2;
+  out[Q_EXT] = out[Q_ABS] + out[Q_SCA];
+  out[Q_PR] = out[Q_EXT] - out[G] * out[Q_SCA];
 }
 
 /** Logarithmic derivatives at the outer face for the two polarisations, order after order from 1. */

@@ -3,7 +3,7 @@ import type { ReactNode } from 'react';
 
 const kinds = {
   info: { look: 'bg-info-soft border-bound', icon: Info, word: 'Note' },
-  ok: { look: 'bg-info-soft border-ok', icon: CircleCheck, word: 'Done' },
+  ok: { look: 'bg-ok-soft border-ok', icon: CircleCheck, word: 'Done' },
   caution: { look: 'bg-caution-soft border-caution', icon: TriangleAlert, word: 'Caution' },
   danger: { look: 'bg-danger-soft border-danger', icon: CircleAlert, word: 'Problem' },
 };

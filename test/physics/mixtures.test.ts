@@ -99,6 +99,13 @@ describe('a mantle', () => {
     expect(coatedEfficiencies(x * (1 - 1e-9), x, n, k, 1.31, 1e-8).qPr / qPr).toBeCloseTo(1, 6);
   });
 
+  test.each([1e-9, 2e-8, 1e-6, 1e-4])('around a grain far smaller than the wavelength (x = %s) keeps the small-particle laws', (x) => {
+    const { qAbs, qPr } = mieEfficiencies(x, 1.7, 0.03);
+    const coated = coatedEfficiencies(0.9 * x, x, 1.7, 0.03, 1.7, 0.03 * (1 + 1e-12));
+    expect(coated.qAbs / qAbs).toBeCloseTo(1, 7);
+    expect(coated.qPr / qPr).toBeCloseTo(1, 7);
+  });
+
   test('changes the density by its share of the volume', () => {
     expect(meanDensityOfCoated({ coreKgM3: 3300, mantleKgM3: 900, mantleVolumeFraction: 0.5 })).toBe(2100);
     expect(coreRadiusShare(7 / 8)).toBeCloseTo(0.5, 15);

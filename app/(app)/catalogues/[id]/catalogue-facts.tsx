@@ -7,7 +7,7 @@ export function CatalogueFacts({ catalogue }: { catalogue: CatalogueItem }) {
   const facts: [string, React.ReactNode][] = [
     [
       'Rows read',
-      `${number(rows.accepted + rows.rejected + rows.blank)} = ${number(rows.accepted)} accepted + ${number(rows.rejected)} rejected + ${number(rows.blank)} blank`,
+      `${number(rows.accepted + rows.rejected + rows.blank)} = ${number(rows.accepted)} valid + ${number(rows.rejected)} not valid + ${number(rows.blank)} blank`,
     ],
     ['Materials', materials.map(({ material, grains }) => `${material} (${number(grains)})`).join(', ') || '—'],
     ['Rule for rows that are not valid', onInvalidRows === 'refuse' ? 'refuse the whole catalogue' : 'leave them out'],

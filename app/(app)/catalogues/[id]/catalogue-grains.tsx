@@ -16,6 +16,9 @@ const columns: GridColumn[] = [
   { field: 'count', header: 'Count', kind: 'number', widthPx: 130 },
 ];
 
+/** They fit into the lower of the two heights. */
+const fewRows = 10;
+
 export function CatalogueGrains({ catalogue }: { catalogue: CatalogueItem }) {
   const filters = useMemo<GridFilter[]>(
     () => [
@@ -36,6 +39,7 @@ export function CatalogueGrains({ catalogue }: { catalogue: CatalogueItem }) {
       columns={columns}
       filters={filters}
       label="Grains of the catalogue"
+      height={catalogue.rows.accepted < fewRows ? 'h-80' : 'h-[32rem]'}
     />
   );
 }

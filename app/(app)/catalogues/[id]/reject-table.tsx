@@ -37,13 +37,13 @@ export function RejectTable({ catalogueId, rejectedRows }: { catalogueId: string
           <caption className="sr-only">Rejected rows with line, column, value and reason</caption>
           <thead className="text-muted text-left">
             <tr>
-              <th scope="col" className="py-1.5 pr-4 text-right font-medium">
+              <th scope="col" className="w-px py-1.5 pr-6 text-right font-medium">
                 Line
               </th>
-              <th scope="col" className="py-1.5 pr-4 font-medium">
+              <th scope="col" className="py-1.5 pr-6 font-medium">
                 Column
               </th>
-              <th scope="col" className="py-1.5 pr-4 font-medium">
+              <th scope="col" className="py-1.5 pr-6 font-medium">
                 Value
               </th>
               <th scope="col" className="py-1.5 font-medium">
@@ -54,9 +54,9 @@ export function RejectTable({ catalogueId, rejectedRows }: { catalogueId: string
           <tbody>
             {items.map((item) => (
               <tr key={item.ordinal} className="border-line border-t align-top">
-                <td className="py-2 pr-4 text-right font-mono tabular-nums">{item.line}</td>
-                <td className="py-2 pr-4 font-mono break-all">{item.column ?? '—'}</td>
-                <td className="max-w-64 py-2 pr-4 font-mono break-all">{item.value ?? '—'}</td>
+                <td className="py-2 pr-6 text-right font-mono tabular-nums">{item.line}</td>
+                <td className="py-2 pr-6 font-mono break-all">{item.column ?? '—'}</td>
+                <td className="max-w-64 py-2 pr-6 font-mono break-all">{item.value ?? '—'}</td>
                 <td className="py-2">{item.reason}</td>
               </tr>
             ))}

@@ -3,7 +3,7 @@
 import { useId, useState } from 'react';
 import { Button } from '@/src/ui/button';
 
-export const pastedFile = (text: string): File => new File([text], 'pasted-table.csv', { type: 'text/csv' });
+export const pastedFile = (text: string): File => new File([text], 'Pasted table.csv', { type: 'text/csv' });
 
 /** For tables that are not in a file, also where there is no keyboard to paste with. */
 export function PasteTable({ onChoose }: { onChoose: (file: File) => void }) {

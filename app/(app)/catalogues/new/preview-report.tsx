@@ -22,7 +22,7 @@ export function PreviewReport({ preview }: { preview: CataloguePreview }) {
       ) : (
         <Notice
           kind="caution"
-          title={`${badLines} of the first ${(accepted.length + badLines).toLocaleString('en-US')} rows are not valid`}
+          title={`${badLines} of the first ${(accepted.length + badLines).toLocaleString('en-US')} rows ${badLines === 1 ? 'is' : 'are'} not valid`}
         >
           <ul className="mt-1 list-disc pl-5 text-sm">
             {problems.slice(0, shownProblems).map(({ line, column, value, reason }, index) => (

@@ -29,9 +29,11 @@ export function sendUpload(form: FormData, onProgress: (share: number) => void):
 
 type Answer = { id?: unknown; detail?: string; errors?: ApiFieldProblem[] };
 
+/** Something between us and the server may have answered with anything. */
 function parsed(text: string): Answer {
   try {
-    return JSON.parse(text) as Answer;
+    const body: unknown = JSON.parse(text);
+    return typeof body === 'object' && body !== null ? body : {};
   } catch {
     return {};
   }
