@@ -107,7 +107,7 @@ describe('directions', () => {
     const isServerOnly = (to: string) => within(to, 'src/db', 'src/queue', 'src/web/page', 'src/web/route', 'src/web/action') || /^(pg|pg-boss|@mikro-orm|node:)/.test(to);
     const clients = sources.filter((file) => file.endsWith('.tsx') && readFileSync(join(root, file), 'utf8').startsWith("'use client'"));
     expect(clients.length).toBeGreaterThan(20);
-    const byFile = Map.groupBy?.(imports, ({ from }) => from) ?? grouped();
+    const byFile = grouped();
     const reached = (file: string, seen: Set<string>, path: string[]): string[] | undefined => {
       if (seen.has(file)) return undefined;
       seen.add(file);
