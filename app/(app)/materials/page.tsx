@@ -63,7 +63,7 @@ export default async function MaterialsPage() {
         columns={columns}
         rows={items}
         rowKey={(material) => material.id}
-        minWidth="min-w-[64rem]"
+        minWidth="sm:min-w-[64rem]"
       />
     </>
   );

@@ -62,7 +62,7 @@ export function Constants() {
   return (
     <DataTable
       caption="Constants"
-      minWidth="min-w-[44rem]"
+      minWidth="sm:min-w-[44rem]"
       rows={shown}
       rowKey={({ symbol }) => symbol}
       columns={[

@@ -67,7 +67,7 @@ export default async function StarsPage() {
         columns={columns}
         rows={items}
         rowKey={(star) => star.id}
-        minWidth="min-w-[70rem]"
+        minWidth="sm:min-w-[70rem]"
       />
     </>
   );

@@ -22,17 +22,17 @@ export function ColumnChoice({ column, firstValues, mapping, onChange }: Props) 
   const units = chosen ? unitsOf(chosen.field) : [];
   return (
     <tr className="border-line border-t align-top">
-      <th scope="row" className="max-w-52 py-2.5 pr-6 text-left font-mono font-normal break-all">
-        {header || '(no name)'}
+      <th scope="row" className="max-w-28 py-2 pr-3 text-left font-mono font-normal sm:max-w-72 sm:pr-6">
+        <span className="break-all">{header || '(no name)'}</span>
+        <span className="text-muted block truncate text-xs">{firstValues.join(' · ')}</span>
       </th>
-      <td className="text-muted max-w-56 truncate py-2.5 pr-6 font-mono">{firstValues.join(' · ')}</td>
-      <td className="py-1.5 pr-6">
+      <td className="py-2 pr-3 sm:pr-6">
         <select
           aria-label={`What the column ${name} holds`}
           aria-invalid={needsAnswer(column) && !chosen}
           value={chosen?.field ?? ''}
           onChange={({ target }) => onChange(withChoice(mapping, column, (target.value || null) as ColumnField | null))}
-          className={`${selectClass} w-full min-w-48`}
+          className={`${selectClass} w-full min-w-32`}
         >
           <option value="">{asItStands(column)}</option>
           {Object.entries(fieldWords).map(([field, words]) => (
@@ -42,7 +42,7 @@ export function ColumnChoice({ column, firstValues, mapping, onChange }: Props) 
           ))}
         </select>
       </td>
-      <td className="py-1.5">
+      <td className="py-2">
         {chosen && units.length > 0 ? (
           <select
             aria-label={`Unit of the column ${name}`}
