@@ -24,7 +24,7 @@ export function drawSizeDistribution(
     layout: {
       barmode: 'stack',
       bargap: 0,
-      margin: { ...plotMargin, t: 76 },
+      margin: { ...plotMargin, t: 100 },
       legend: {
         orientation: 'h',
         x: 1,

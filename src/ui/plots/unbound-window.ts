@@ -16,13 +16,13 @@ export function cutoffsOf(
   materials: readonly MaterialWindows[],
   logRange: readonly [number, number],
   style: LabelStyle = 'full',
-  levels = 3,
+  levels = 5,
 ): Cutoff[] {
   const { lettersAcross, hasName } = labelStyles[style];
   const ends = materials.flatMap(({ name, unboundIntervalsUm }, material) =>
     [...new Set(unboundIntervalsUm.flat())]
       .filter((radiusUm): radiusUm is number => radiusUm !== null && radiusUm > 0)
-      .map((radiusUm) => ({ radiusUm, material, label: hasName ? `${name} ${trimmed(radiusUm)}` : trimmed(radiusUm) })),
+      .map((radiusUm) => ({ radiusUm, material, label: hasName ? `${shortName(name)} ${trimmed(radiusUm)}` : trimmed(radiusUm) })),
   );
   const visible = ends.filter(
     ({ radiusUm }) => Math.log10(radiusUm) >= logRange[0] && Math.log10(radiusUm) <= logRange[1],
@@ -33,6 +33,9 @@ export function cutoffsOf(
     levels,
   );
 }
+
+/** What stands in brackets tells materials apart in lists, not beside a line of their own dash and colour. */
+const shortName = (name: string) => name.replace(/\s*\(.*\)$/, '');
 
 /** Labels grow to the right from their line; `perLetter` is the width of a letter along the axis. */
 function withLevels(ends: Omit<Cutoff, 'level'>[], perLetter: number, levels: number): Cutoff[] {
