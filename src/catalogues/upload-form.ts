@@ -4,7 +4,7 @@ import { Readable } from 'node:stream';
 import { pipeline } from 'node:stream/promises';
 import { z } from 'zod';
 import { Refusal } from '@/src/errors';
-import { columnMapping } from './mapping';
+import { mappingWords } from './mapping-words';
 import { catalogueDefaults, invalidRowRule } from './schema';
 import { spool, type Spooled } from './spool';
 
@@ -25,7 +25,7 @@ const json = <T extends z.ZodType>(schema: T) =>
 
 export const uploadFields = z.strictObject({
   name: z.string().trim().min(1, 'is needed').max(200),
-  mapping: json(columnMapping).optional(),
+  mapping: json(mappingWords).optional(),
   defaults: json(catalogueDefaults).optional(),
   onInvalidRows: invalidRowRule.default('refuse'),
 });

@@ -149,6 +149,14 @@ describe('the upload form', () => {
     expect(await (await forkEm()).count(Catalogue, {})).toBe(before);
   });
 
+  test.each([
+    ['words as headers have them', { Size: 'diameter_um', Rho: 'density_g_cm3', Comp: 'material' }],
+    ['fields and units', { Size: { field: 'diameter', unit: 'um' }, Rho: { field: 'density', unit: 'g_cm3' }, Comp: { field: 'material' } }],
+  ])('may tell columns by %s', async (_, mapping) => {
+    const catalogue = await uploaded(member, { file: 'Size,Rho,Comp\n2,3,ice\n', mapping });
+    expect(catalogue).toMatchObject({ status: 'ready', failure: null });
+  });
+
   test('may say what columns hold and what rows lack', async () => {
     const file = 'Size,Comp\n2,x\n';
     const catalogue = await uploaded(member, {
