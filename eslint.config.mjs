@@ -5,6 +5,8 @@ import nextTypescript from 'eslint-config-next/typescript';
 export default defineConfig([
   ...nextVitals,
   ...nextTypescript,
-  { rules: { '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_' }] } },
-  globalIgnores(['.next/**', '.local/**', 'next-env.d.ts']),
+  { rules: { '@typescript-eslint/no-unused-vars': ['error', { argsIgnorePattern: '^_', varsIgnorePattern: '^_' }] } },
+  // Rules of pages mean nothing in tests.
+  { files: ['test/**'], rules: { '@next/next/no-assign-module-variable': 'off' } },
+  globalIgnores(['.next/**', '.next-test/**', '.local/**', 'next-env.d.ts']),
 ]);

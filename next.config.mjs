@@ -10,7 +10,7 @@ const fixedHeaders = [
 ];
 
 /** @type {import('next').NextConfig} */
-export default {
+const config = {
   distDir: process.env.CHAFFLINE_NEXT_DIR ?? '.next',
   poweredByHeader: false,
   reactStrictMode: true,
@@ -33,3 +33,5 @@ export default {
     'rate-limiter-flexible',
   ],
 };
+
+export default config;

@@ -3,6 +3,7 @@ export { CatalogueChunk } from './catalogue-chunk';
 export { ChangeRecord } from './change-record';
 export { Curve } from './curve';
 export { Grain } from './grain';
+export { Invitation } from './invitation';
 export { Material } from './material';
 export { MaterialVersion } from './material-version';
 export { Membership } from './membership';

@@ -7,7 +7,7 @@ const root = fileURLToPath(new URL('..', import.meta.url));
 const areas = ['catalogues', 'runs', 'stars', 'materials', 'people', 'sharing', 'studies', 'audit', 'mail'];
 
 /** What areas stand on, beside physics, access and entities: errors, environment, log, queue, claims, and the COPY writer. */
-const ground = ['src/errors', 'src/env', 'src/log', 'src/queue', 'src/claim', 'src/copy'];
+const ground = ['src/errors', 'src/env', 'src/log', 'src/queue', 'src/claim', 'src/copy', 'src/csv-line'];
 
 const sources = ['app', 'src', 'entities', 'migrations', 'fixtures'].flatMap((folder) => filesBelow(join(root, folder)));
 

@@ -1,8 +1,10 @@
 import Link from 'next/link';
 import type { ReactNode } from 'react';
 import type { Actor } from '@/src/access/actor';
+import { may } from '@/src/access/policy';
 import { Navigation, NavigationMenu } from '@/src/ui/navigation';
 import { PersonMenu } from '@/src/ui/person-menu';
+import { roleWords } from '@/src/ui/role-words';
 import { ThemeSwitch } from '@/src/ui/theme-switch';
 import { Wordmark } from '@/src/ui/wordmark';
 import { pageActor } from '@/src/web/page';
@@ -29,7 +31,7 @@ export default async function ShellLayout({ children }: { children: ReactNode })
           </Link>
           <div className="flex items-center gap-1">
             <ThemeSwitch />
-            <PersonMenu name={actor.name} groupName={actor.groupName} role={roleWords(actor)} signOut={signOutAction} />
+            <PersonMenu name={actor.name} groupName={actor.groupName} role={roleOf(actor)} links={linksOf(actor)} signOut={signOutAction} />
           </div>
         </div>
         <Navigation items={places} />
@@ -48,9 +50,13 @@ export default async function ShellLayout({ children }: { children: ReactNode })
   );
 }
 
-const roles = { pi: 'Principal investigator', researcher: 'Researcher', student: 'Student' };
-
-function roleWords({ role, platformRole }: Actor): string {
-  if (role) return roles[role];
-  return platformRole === 'admin' ? 'Administrator' : 'Without a group';
+function roleOf({ role, platformRole }: Actor): string {
+  return roleWords[role ?? (platformRole === 'admin' ? 'admin' : 'groupless')];
 }
+
+const linksOf = (actor: Actor) => [
+  { href: '/group', label: 'Group and people' },
+  ...(may(actor, 'changes.read') ? [{ href: '/changes', label: 'Record of changes' }] : []),
+  { href: '/account', label: 'Account and access tokens' },
+  { href: '/roles', label: 'What each role may do' },
+];

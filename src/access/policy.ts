@@ -2,7 +2,8 @@ import type { GroupRole } from '@/entities/membership';
 import { Refusal } from '@/src/errors';
 import type { Actor } from './actor';
 
-type Role = GroupRole | 'admin';
+/** `groupless` is a person who is signed in and belongs to no group. */
+export type Role = GroupRole | 'admin' | 'groupless';
 
 /** Who may do what: the one table. A role that is not named may not. */
 export const permissions = {
@@ -11,9 +12,13 @@ export const permissions = {
   'run.read': { does: 'See the runs of the group', roles: ['pi', 'researcher', 'student'], scope: 'read' },
   'run.request': { does: 'Request a run', roles: ['pi', 'researcher', 'student'], scope: 'write' },
   'run.cancel': { does: 'Cancel a run', roles: ['pi', 'researcher', 'student'], scope: 'write' },
-  'star.read': { does: 'See star presets', roles: ['pi', 'researcher', 'student', 'admin'], scope: 'read' },
-  'material.read': { does: 'See materials', roles: ['pi', 'researcher', 'student', 'admin'], scope: 'read' },
-  'curve.compute': { does: 'Use the calculator', roles: ['pi', 'researcher', 'student', 'admin'], scope: 'read' },
+  'star.read': { does: 'See star presets', roles: ['pi', 'researcher', 'student', 'admin', 'groupless'], scope: 'read' },
+  'material.read': { does: 'See materials', roles: ['pi', 'researcher', 'student', 'admin', 'groupless'], scope: 'read' },
+  'curve.compute': { does: 'Use the calculator', roles: ['pi', 'researcher', 'student', 'admin', 'groupless'], scope: 'read' },
+  'group.create': { does: 'Start a further group', roles: ['pi', 'researcher', 'student', 'admin', 'groupless'], scope: 'write' },
+  'group.read': { does: 'See who belongs to the group', roles: ['pi', 'researcher', 'student'], scope: 'read' },
+  'group.manage': { does: 'Invite and remove people, set roles, rename the group', roles: ['pi'], scope: 'write' },
+  'changes.read': { does: 'Read the record of changes', roles: ['pi', 'admin'], scope: 'read' },
   'token.manage': {
     does: 'Make and revoke own access tokens',
     roles: ['pi', 'researcher', 'student', 'admin'],
@@ -28,7 +33,7 @@ export function may(actor: Actor, permission: Permission): boolean {
   if (!(actor.scopes as readonly string[]).includes(rule.scope)) return false;
   const roles: readonly Role[] = rule.roles;
   if (actor.platformRole === 'admin' && roles.includes('admin')) return true;
-  return actor.groupId !== null && actor.role !== null && roles.includes(actor.role);
+  return roles.includes(actor.groupId === null || actor.role === null ? 'groupless' : actor.role);
 }
 
 export function demand(actor: Actor, permission: Permission): void {

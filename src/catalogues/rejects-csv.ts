@@ -1,4 +1,4 @@
-import { csvLine } from './csv-line';
+import { csvLine } from '@/src/csv-line';
 import type { RejectRow } from './reject-row';
 
 export const rejectsCsvHeader = csvLine(['line', 'column', 'value', 'reason', 'row']);

@@ -1,6 +1,7 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import { z } from 'zod';
 import { Membership, Person } from '@/entities';
+import { recordChange } from '@/src/audit/record-change';
 import { Refusal } from '@/src/errors';
 import { passwordMatches } from './passwords';
 import { email } from './sign-up';
@@ -14,5 +15,12 @@ export async function signIn(em: EntityManager, input: z.infer<typeof signInInpu
     throw new Refusal('unauthenticated', 'This e-mail address and password do not belong together.');
   }
   const membership = await em.findOne(Membership, { person: person.id }, { orderBy: { createdAt: 'asc', id: 'asc' } });
-  return { personId: person.id, groupId: membership?.group.id ?? null };
+  const groupId = membership?.group.id ?? null;
+  recordChange(
+    em,
+    { personId: person.id, name: person.name },
+    { action: 'account.signIn', target: { kind: 'person', id: person.id, name: person.name }, groupId },
+  );
+  await em.flush();
+  return { personId: person.id, groupId };
 }

@@ -1,6 +1,7 @@
 import { UniqueConstraintViolationException, type EntityManager } from '@mikro-orm/postgresql';
 import { z } from 'zod';
 import { Membership, Person, ResearchGroup } from '@/entities';
+import { recordChange } from '@/src/audit/record-change';
 import { Refusal } from '@/src/errors';
 import { checkNewPassword, hashPassword } from './passwords';
 
@@ -23,6 +24,12 @@ export async function signUp(em: EntityManager, input: SignUpInput): Promise<{ p
       const person = tx.create(Person, { name: input.name, email: input.email, passwordHash });
       const group = tx.create(ResearchGroup, { name: input.groupName });
       tx.create(Membership, { person, group, role: 'pi' });
+      await tx.flush();
+      recordChange(
+        tx,
+        { personId: person.id, name: person.name },
+        { action: 'account.signUp', target: { kind: 'group', id: group.id, name: group.name }, groupId: group.id },
+      );
       await tx.flush();
       return { personId: person.id, groupId: group.id };
     });

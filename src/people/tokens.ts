@@ -4,6 +4,7 @@ import { PersonalToken } from '@/entities';
 import type { TokenScope } from '@/entities/personal-token';
 import type { Actor } from '@/src/access/actor';
 import { demand } from '@/src/access/policy';
+import { recordChange } from '@/src/audit/record-change';
 import { notFound, Refusal } from '@/src/errors';
 
 const prefix = 'chaff_';
@@ -17,22 +18,32 @@ export type TokenRequest = { name: string; scopes: TokenScope[]; expiresInDays: 
 /** The token itself is returned here and nowhere else: the table keeps its hash. */
 export async function makeToken(em: EntityManager, actor: Actor, request: TokenRequest) {
   demand(actor, 'token.manage');
-  if (!actor.groupId) throw new Refusal('conflict', 'Join or choose a group first: a token works for one group.');
+  const { groupId } = actor;
+  if (!groupId) throw new Refusal('conflict', 'Join or choose a group first: a token works for one group.');
   if (!(request.expiresInDays >= 1 && request.expiresInDays <= longestDays)) {
     throw new Refusal('invalid', `A token lasts 1 to ${longestDays} days.`);
   }
   const token = prefix + randomBytes(32).toString('base64url');
-  const row = em.create(PersonalToken, {
-    person: actor.personId,
-    group: actor.groupId,
-    name: request.name,
-    secretSha256: tokenDigest(token),
-    lastFour: token.slice(-4),
-    scopes: request.scopes,
-    expiresAt: new Date(Date.now() + request.expiresInDays * dayMs),
+  return em.transactional(async (tx) => {
+    const row = tx.create(PersonalToken, {
+      person: actor.personId,
+      group: groupId,
+      name: request.name,
+      secretSha256: tokenDigest(token),
+      lastFour: token.slice(-4),
+      scopes: request.scopes,
+      expiresAt: new Date(Date.now() + request.expiresInDays * dayMs),
+    });
+    await tx.flush();
+    recordChange(tx, actor, {
+      action: 'token.make',
+      target: { kind: 'token', id: row.id, name: request.name },
+      groupId: actor.groupId,
+      after: { scopes: request.scopes, expiresAt: row.expiresAt.toISOString() },
+    });
+    await tx.flush();
+    return { id: row.id, token, expiresAt: row.expiresAt };
   });
-  await em.flush();
-  return { id: row.id, token, expiresAt: row.expiresAt };
 }
 
 export async function listTokens(em: EntityManager, actor: Actor) {
@@ -58,10 +69,9 @@ export type TokenItem = Awaited<ReturnType<typeof listTokens>>[number];
 
 export async function revokeToken(em: EntityManager, actor: Actor, id: string): Promise<void> {
   demand(actor, 'token.manage');
-  const changed = await em.nativeUpdate(
-    PersonalToken,
-    { id, person: actor.personId, revokedAt: null },
-    { revokedAt: new Date() },
-  );
-  if (changed === 0) throw notFound('token');
+  await em.transactional(async (tx) => {
+    const own = { id, person: actor.personId, revokedAt: null };
+    if ((await tx.nativeUpdate(PersonalToken, own, { revokedAt: new Date() })) === 0) throw notFound('token');
+    recordChange(tx, actor, { action: 'token.revoke', target: { kind: 'token', id }, groupId: actor.groupId });
+  });
 }

@@ -1,6 +1,6 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import type { Actor } from '@/src/access/actor';
-import { csvLine } from '@/src/catalogues/csv-line';
+import { csvLine } from '@/src/csv-line';
 import { finishedRun } from './finished-run';
 import { runGrainFrom, runGrainItemOf, runGrainSelect, type RunGrainRow } from './run-grain-row';
 import type { RunGrainItem } from './schema';

@@ -8,7 +8,7 @@ const columns: DataColumn<CatalogueItem>[] = [
   {
     header: 'Catalogue',
     show: ({ id, name }) => (
-      <Link href={`/catalogues/${id}`} className="block max-w-72 truncate hover:underline">
+      <Link href={`/catalogues/${id}`} className="block hover:underline max-sm:py-0.5 sm:max-w-72 sm:truncate">
         {name}
       </Link>
     ),
@@ -23,7 +23,9 @@ const columns: DataColumn<CatalogueItem>[] = [
   {
     header: 'Materials',
     show: ({ materials }) => (
-      <span className="block max-w-60 truncate">{materials.map(({ material }) => material).join(', ') || '—'}</span>
+      <span className="block sm:max-w-60 sm:truncate">
+        {materials.map(({ material }) => material).join(', ') || '—'}
+      </span>
     ),
   },
   { header: 'Uploaded', show: ({ createdAt }) => <Moment iso={createdAt} /> },

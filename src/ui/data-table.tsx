@@ -44,7 +44,11 @@ export function DataTable<Row>({ caption, columns, rows, rowKey, minWidth = 'sm:
               role="row"
               className="border-line hover:bg-panel border-t align-top max-sm:block max-sm:py-3"
             >
-              <th role="rowheader" scope="row" className="text-left font-medium max-sm:block sm:py-2.5 sm:pr-8">
+              <th
+                role="rowheader"
+                scope="row"
+                className="text-left font-medium max-sm:block max-sm:text-base sm:py-2.5 sm:pr-8"
+              >
                 {name.show(row)}
               </th>
               {others.map((column, index) => (

@@ -2,10 +2,16 @@ import Link from 'next/link';
 import { Button } from './button';
 import { Disclosure } from './disclosure';
 
-type Props = { name: string; groupName: string | null; role: string; signOut: () => Promise<void> };
+type Props = {
+  name: string;
+  groupName: string | null;
+  role: string;
+  links: readonly { href: string; label: string }[];
+  signOut: () => Promise<void>;
+};
 
 /** Who is signed in, for which group, and the way out. */
-export function PersonMenu({ name, groupName, role, signOut }: Props) {
+export function PersonMenu({ name, groupName, role, links, signOut }: Props) {
   return (
     <Disclosure
       summaryClass="hover:bg-line/50 flex min-h-11 items-center gap-2 rounded-md px-2"
@@ -29,9 +35,15 @@ export function PersonMenu({ name, groupName, role, signOut }: Props) {
             {groupName ? `, ${groupName}` : ''}
           </p>
         </div>
-        <Link href="/account" className="prose-link text-sm">
-          Account and access tokens
-        </Link>
+        <ul className="grid gap-1.5">
+          {links.map(({ href, label }) => (
+            <li key={href}>
+              <Link href={href} className="prose-link text-sm">
+                {label}
+              </Link>
+            </li>
+          ))}
+        </ul>
         <form action={signOut}>
           <Button type="submit" size="small">
             Sign out

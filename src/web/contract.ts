@@ -6,6 +6,7 @@ import {
   invalidRowRule,
   rejectItem,
 } from '@/src/catalogues/schema';
+import { changeItem, changeSearch } from '@/src/audit/schema';
 import { columnMapping } from '@/src/catalogues/mapping';
 import { materialItem } from '@/src/materials/schema';
 import { grainQuery } from '@/src/runs/grain-query';
@@ -147,6 +148,20 @@ export const contract = {
     path: '/runs/{id}/export.csv',
     summary: 'All grains of a run as CSV',
     params,
+    reply: 'text/csv',
+  },
+  listChanges: {
+    method: 'get',
+    path: '/changes',
+    summary: 'The record of changes: of the own group, for administrators of all',
+    query: changeSearch.extend({ after: z.string().max(600).optional() }),
+    reply: pageOf(changeItem),
+  },
+  downloadChanges: {
+    method: 'get',
+    path: '/changes.csv',
+    summary: 'The same as CSV, all that match',
+    query: changeSearch,
     reply: 'text/csv',
   },
 } as const satisfies Record<string, Endpoint>;

@@ -3,17 +3,18 @@ import { contract } from '@/src/web/contract';
 import type { Endpoint } from '@/src/web/endpoint';
 import { call, json } from './call';
 import { handlerOf } from './handlers';
-import { useOwnDatabase } from './own-database';
+import { withOwnDatabase } from './own-database';
 import { newGroup, newMember, type Member } from './people';
 import { circular, ran } from './runs';
 import { uploaded, uploadForm } from './upload';
 
-useOwnDatabase();
+withOwnDatabase();
 
 type Name = keyof typeof contract;
 
 let own: Member;
 let student: Member;
+let investigator: Member;
 let other: Member;
 let readOnly: Member;
 let ids: { catalogue: string; run: string };
@@ -22,10 +23,16 @@ beforeAll(async () => {
   const group = await newGroup();
   own = await newMember(group, 'researcher');
   student = await newMember(group, 'student');
+  investigator = await newMember(group, 'pi');
   readOnly = await newMember(group, 'researcher', ['read']);
   other = await newMember(await newGroup(), 'pi');
   const catalogue = await uploaded(own);
-  const run = await ran(own, { catalogueId: catalogue.id, starSlug: 'sun', release: circular, optics: { model: 'constant', qpr: 1 } });
+  const run = await ran(own, {
+    catalogueId: catalogue.id,
+    starSlug: 'sun',
+    release: circular,
+    optics: { model: 'constant', qpr: 1 },
+  });
   ids = { catalogue: catalogue.id, run: run.id };
 });
 
@@ -34,11 +41,18 @@ const paramsOf = (path: string) => ({ id: path.startsWith('/runs') ? ids.run : i
 async function ask(name: Name, as?: Member): Promise<Response> {
   const { method, path }: Endpoint = contract[name];
   const bodies: Partial<Record<Name, object>> = {
-    requestRun: { json: { catalogueId: ids.catalogue, starSlug: 'sun', release: circular, optics: { model: 'constant', qpr: 1 } } },
+    requestRun: {
+      json: { catalogueId: ids.catalogue, starSlug: 'sun', release: circular, optics: { model: 'constant', qpr: 1 } },
+    },
     computeCurve: { json: { slug: 'astrosil', starSlug: 'sun', optics: { model: 'constant', qpr: 1 } } },
     uploadCatalogue: { form: uploadForm() },
   };
-  return call(await handlerOf(contract[name]), { as, params: paramsOf(path), method: method.toUpperCase(), ...bodies[name] });
+  return call(await handlerOf(contract[name]), {
+    as,
+    params: paramsOf(path),
+    method: method.toUpperCase(),
+    ...bodies[name],
+  });
 }
 
 const names = Object.keys(contract) as Name[];
@@ -46,6 +60,8 @@ const ofAGroup = names.filter((name) => contract[name].path.includes('{id}'));
 
 /** What a student may not do; everything else in the contract is for every member of the group. */
 const notForStudents = new Set<Name>(['uploadCatalogue']);
+/** For principal investigators (and administrators) alone. */
+const forInvestigators = new Set<Name>(['listChanges', 'downloadChanges']);
 const changes = new Set<Name>(['uploadCatalogue', 'requestRun', 'cancelRun']);
 /** A run that has ended cannot be cancelled: that, not the access, is what is refused. */
 const conflicts = new Set<Name>(['cancelRun']);
@@ -57,22 +73,30 @@ describe('every route of the contract', () => {
 
   test.each(ofAGroup)('%s does not tell another group from nothing', async (name) => {
     const foreign = await json(ask(name, other), 404);
-    const nothing = await json(call(await handlerOf(contract[name]), { as: own, params: { id: '00000000-0000-4000-8000-000000000000' }, method: contract[name].method.toUpperCase() }), 404);
+    const nothing = await json(
+      call(await handlerOf(contract[name]), {
+        as: own,
+        params: { id: '00000000-0000-4000-8000-000000000000' },
+        method: contract[name].method.toUpperCase(),
+      }),
+      404,
+    );
     expect({ ...foreign, instance: '' }).toEqual({ ...nothing, instance: '' });
   });
 
-  test.each(names)('%s is open to a researcher of the group', async (name) => {
-    const { status } = await ask(name, own);
+  test.each(names)('%s is open to those it is for', async (name) => {
+    const { status } = await ask(name, forInvestigators.has(name) ? investigator : own);
     expect(status).toBe(conflicts.has(name) ? 409 : ((contract[name] as Endpoint).status ?? 200));
+    if (forInvestigators.has(name)) expect((await ask(name, own)).status).toBe(403);
   });
 
   test.each(names)('%s and students: as the table says', async (name) => {
     const { status } = await ask(name, student);
-    expect(status === 403).toBe(notForStudents.has(name));
+    expect(status === 403).toBe(notForStudents.has(name) || forInvestigators.has(name));
   });
 
   test.each(names)('%s and a token that may only read', async (name) => {
-    expect((await ask(name, readOnly)).status === 403).toBe(changes.has(name));
+    expect((await ask(name, readOnly)).status === 403).toBe(changes.has(name) || forInvestigators.has(name));
   });
 
   test.each(['not-a-uuid', '1', "' or 1=1"])('an id such as %s is nothing', async (id) => {
@@ -86,6 +110,11 @@ test('lists show the own group alone', async () => {
 });
 
 test('a run on another group’s catalogue is refused as if there were none', async () => {
-  const body = { catalogueId: ids.catalogue, starSlug: 'sun', release: circular, optics: { model: 'constant', qpr: 1 } };
+  const body = {
+    catalogueId: ids.catalogue,
+    starSlug: 'sun',
+    release: circular,
+    optics: { model: 'constant', qpr: 1 },
+  };
   await json(call(await handlerOf(contract.requestRun), { as: other, json: body }), 404);
 });

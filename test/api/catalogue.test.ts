@@ -10,28 +10,35 @@ import { Catalogue, Grain, Reject } from '@/entities';
 import type { CatalogueGrainItem, CatalogueItem, RejectItem } from '@/src/catalogues/schema';
 import { forkEm } from '@/src/db';
 import { call, json } from './call';
-import { useOwnDatabase } from './own-database';
+import { withOwnDatabase } from './own-database';
 import { newGroup, newMember, type Member } from './people';
 import { uploaded, uploadForm } from './upload';
 
-useOwnDatabase();
+withOwnDatabase();
 
 let member: Member;
 beforeAll(async () => {
   member = await newMember(await newGroup(), 'researcher');
 });
 
-const withBadRows = 'radius_um,density_g_cm3,material,label\n1,2.5,astrosil,a\n-1,2.5,astrosil,b\n2,2.5,unobtainium,c\n3,2.5,ice,=cmd\n';
+const withBadRows =
+  'radius_um,density_g_cm3,material,label\n1,2.5,astrosil,a\n-1,2.5,astrosil,b\n2,2.5,unobtainium,c\n3,2.5,ice,=cmd\n';
 
 describe('a catalogue without fault', () => {
-  const file = 'label,diameter_nm,density_kg_m3,material,count\nfirst,500,2500,silicate,3\nsecond,1000,917,Water ice,1\n';
+  const file =
+    'label,diameter_nm,density_kg_m3,material,count\nfirst,500,2500,silicate,3\nsecond,1000,917,Water ice,1\n';
   let catalogue: CatalogueItem;
   beforeAll(async () => {
     catalogue = await uploaded(member, { file, name: 'Two grains' });
   });
 
   test('is ready, counted and digested', () => {
-    expect(catalogue).toMatchObject({ name: 'Two grains', status: 'ready', failure: null, rows: { accepted: 2, rejected: 0, blank: 0 } });
+    expect(catalogue).toMatchObject({
+      name: 'Two grains',
+      status: 'ready',
+      failure: null,
+      rows: { accepted: 2, rejected: 0, blank: 0 },
+    });
     expect(catalogue.sha256).toBe(createHash('sha256').update(file).digest('hex'));
     expect(catalogue.materials).toEqual([
       { material: 'astrosil', grains: 1 },
@@ -40,8 +47,19 @@ describe('a catalogue without fault', () => {
   });
 
   test('has its units converted once, at the door', async () => {
-    const { items } = await json<{ items: CatalogueGrainItem[] }>(call(getGrains, { as: member, params: { id: catalogue.id }, query: { sort: 'radiusUm', order: 'desc' } }));
-    expect(items.map(({ label, radiusUm, densityGCm3, material, count, line }) => [label, radiusUm, densityGCm3, material, count, line])).toEqual([
+    const { items } = await json<{ items: CatalogueGrainItem[] }>(
+      call(getGrains, { as: member, params: { id: catalogue.id }, query: { sort: 'radiusUm', order: 'desc' } }),
+    );
+    expect(
+      items.map(({ label, radiusUm, densityGCm3, material, count, line }) => [
+        label,
+        radiusUm,
+        densityGCm3,
+        material,
+        count,
+        line,
+      ]),
+    ).toEqual([
       ['second', 0.5, 0.917, 'water_ice', 1, 3],
       ['first', 0.25, 2.5, 'astrosil', 3, 2],
     ]);
@@ -58,7 +76,11 @@ describe('a catalogue without fault', () => {
     const large = await uploaded(member, { file: many });
     expect(large.rows.accepted).toBe(90_000);
     const response = await call(getOriginal, { as: member, params: { id: large.id } });
-    expect(createHash('sha256').update(Buffer.from(await response.arrayBuffer())).digest('hex')).toBe(large.sha256);
+    expect(
+      createHash('sha256')
+        .update(Buffer.from(await response.arrayBuffer()))
+        .digest('hex'),
+    ).toBe(large.sha256);
   });
 });
 
@@ -67,7 +89,9 @@ describe('a catalogue with bad rows', () => {
     const catalogue = await uploaded(member, { file: withBadRows });
     expect(catalogue).toMatchObject({ status: 'failed', rows: { rejected: 2 } });
     expect(catalogue.failure).toMatch(/2 rows are not valid/);
-    const { items, total } = await json<{ items: RejectItem[]; total: number }>(call(getRejects, { as: member, params: { id: catalogue.id } }));
+    const { items, total } = await json<{ items: RejectItem[]; total: number }>(
+      call(getRejects, { as: member, params: { id: catalogue.id } }),
+    );
     expect(total).toBe(2);
     expect(items[0]).toMatchObject({ line: 3, column: 'radius_um', value: '-1' });
     expect(items[1]).toMatchObject({ line: 4, column: 'material', value: 'unobtainium' });
@@ -87,7 +111,8 @@ describe('a catalogue with bad rows', () => {
 });
 
 describe('a file that cannot be read', () => {
-  const awkward = (name: string) => new Uint8Array(readFileSync(new URL(`../../fixtures/catalogues/awkward/${name}`, import.meta.url)));
+  const awkward = (name: string) =>
+    new Uint8Array(readFileSync(new URL(`../../fixtures/catalogues/awkward/${name}`, import.meta.url)));
   test.each([
     ['picture.bin', /PNG image/],
     ['only-comments.csv', /./],
@@ -104,7 +129,12 @@ describe('a file that cannot be read', () => {
     expect(catalogue.failure).toMatch(sentence);
     const em = await forkEm();
     expect(await em.count(Grain, { catalogue: catalogue.id })).toBe(0);
-    const kept = await json<CatalogueItem>((await import('@/app/api/v1/catalogues/[id]/route')).GET(new Request('http://localhost/', { headers: { authorization: `Bearer ${member.token}` } }), { params: Promise.resolve({ id: catalogue.id }) }));
+    const kept = await json<CatalogueItem>(
+      (await import('@/app/api/v1/catalogues/[id]/route')).GET(
+        new Request('http://localhost/', { headers: { authorization: `Bearer ${member.token}` } }),
+        { params: Promise.resolve({ id: catalogue.id }) },
+      ),
+    );
     expect(kept.failure).toBe(catalogue.failure);
   });
 
@@ -143,7 +173,11 @@ describe('the upload form', () => {
   test('that breaks off stores nothing', async () => {
     const before = await (await forkEm()).count(Catalogue, {});
     const body = '--x\r\ncontent-disposition: form-data; name="file"; filename="a.csv"\r\n\r\nradius_um,dens';
-    const request = new Request('http://localhost/api/v1/catalogues', { method: 'POST', body, headers: { authorization: `Bearer ${member.token}`, 'content-type': 'multipart/form-data; boundary=x' } });
+    const request = new Request('http://localhost/api/v1/catalogues', {
+      method: 'POST',
+      body,
+      headers: { authorization: `Bearer ${member.token}`, 'content-type': 'multipart/form-data; boundary=x' },
+    });
     const problem = await json(POST(request, { params: Promise.resolve({}) }), 400);
     expect(problem.detail).toMatch(/broke off/);
     expect(await (await forkEm()).count(Catalogue, {})).toBe(before);
@@ -151,7 +185,14 @@ describe('the upload form', () => {
 
   test.each([
     ['words as headers have them', { Size: 'diameter_um', Rho: 'density_g_cm3', Comp: 'material' }],
-    ['fields and units', { Size: { field: 'diameter', unit: 'um' }, Rho: { field: 'density', unit: 'g_cm3' }, Comp: { field: 'material' } }],
+    [
+      'fields and units',
+      {
+        Size: { field: 'diameter', unit: 'um' },
+        Rho: { field: 'density', unit: 'g_cm3' },
+        Comp: { field: 'material' },
+      },
+    ],
   ])('may tell columns by %s', async (_, mapping) => {
     const catalogue = await uploaded(member, { file: 'Size,Rho,Comp\n2,3,ice\n', mapping });
     expect(catalogue).toMatchObject({ status: 'ready', failure: null });

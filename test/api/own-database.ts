@@ -9,7 +9,7 @@ import { closeLimits } from '@/src/web/rate-limit';
 import { databaseUrl, withAdmin } from './template-database';
 
 /** A database of this file's own, copied from the template; everything of the product in this process uses it. */
-export function useOwnDatabase(): void {
+export function withOwnDatabase(): void {
   const name = `chaffline_test_${randomBytes(6).toString('hex')}`;
   beforeAll(async () => {
     const adminUrl = inject('adminUrl');

@@ -6,12 +6,12 @@ import { GET as exportCsv } from '@/app/api/v1/runs/[id]/export.csv/route';
 import { POST as postCurve } from '@/app/api/v1/curves/route';
 import type { CurveAnswer, RunCurves, RunGrainItem, RunHistogram, RunItem } from '@/src/runs/schema';
 import { call, json } from './call';
-import { useOwnDatabase } from './own-database';
+import { withOwnDatabase } from './own-database';
 import { newGroup, newMember, type Member } from './people';
 import { circular, ran } from './runs';
 import { uploaded } from './upload';
 
-useOwnDatabase();
+withOwnDatabase();
 
 /** SPEC of the table: hand-checked fates of seven grains at the Sun, Q_pr 1, circular release (1 repelled, 3 more unbound, 3 bound). */
 const sevenGrains = [

@@ -10,10 +10,10 @@ import { signUp } from '@/src/people/sign-up';
 import { revokeToken } from '@/src/people/tokens';
 import { refuseAbove, countAgainst, limits } from '@/src/web/rate-limit';
 import { call, json } from './call';
-import { useOwnDatabase } from './own-database';
+import { withOwnDatabase } from './own-database';
 import { newGroup, newMember } from './people';
 
-useOwnDatabase();
+withOwnDatabase();
 
 const password = 'grains drift away';
 let made = 0;
@@ -29,7 +29,10 @@ describe('signing up and in', () => {
     const { email, personId, groupId } = await newPerson();
     const person = await (await forkEm()).findOneOrFail(Person, { email }, { populate: ['passwordHash'] });
     expect(person.passwordHash).toMatch(/^\$argon2id\$v=19\$m=47104,t=1,p=1\$/);
-    expect(await (await forkEm()).findOneOrFail(Membership, { person: personId })).toMatchObject({ role: 'pi', group: { id: groupId } });
+    expect(await (await forkEm()).findOneOrFail(Membership, { person: personId })).toMatchObject({
+      role: 'pi',
+      group: { id: groupId },
+    });
     expect(await signIn(await forkEm(), { email, password })).toEqual({ personId, groupId });
   });
 
@@ -39,7 +42,11 @@ describe('signing up and in', () => {
       { email, password: 'not this one at all' },
       { email: 'nobody@example.org', password },
     ];
-    const refusals = await Promise.all(attempts.map(async (attempt) => signIn(await forkEm(), attempt).catch((error: Refusal) => [error.kind, error.message])));
+    const refusals = await Promise.all(
+      attempts.map(async (attempt) =>
+        signIn(await forkEm(), attempt).catch((error: Refusal) => [error.kind, error.message]),
+      ),
+    );
     expect(refusals[0]).toEqual(refusals[1]);
     expect(refusals[0]).toEqual(['unauthenticated', expect.stringMatching(/do not belong together/)]);
   });
@@ -51,7 +58,9 @@ describe('signing up and in', () => {
 
   test('does not take an address twice', async () => {
     const { email } = await newPerson();
-    await expect(signUp(await forkEm(), { name: 'B', email, password, groupName: 'G' })).rejects.toMatchObject({ kind: 'conflict' });
+    await expect(signUp(await forkEm(), { name: 'B', email, password, groupName: 'G' })).rejects.toMatchObject({
+      kind: 'conflict',
+    });
   });
 });
 
@@ -86,7 +95,8 @@ describe('a session', () => {
   test('changes nothing for a page of another site', async () => {
     const { personId, groupId } = await newPerson();
     const secret = await startSession(await forkEm(), personId, groupId, '');
-    const post = (headers: Record<string, string>) => call(postRun, { json: {}, headers: { ...cookie(secret), ...headers } });
+    const post = (headers: Record<string, string>) =>
+      call(postRun, { json: {}, headers: { ...cookie(secret), ...headers } });
     expect((await post({ 'sec-fetch-site': 'cross-site' })).status).toBe(403);
     expect((await post({ origin: 'https://elsewhere.example', host: 'localhost' })).status).toBe(403);
     expect((await post({})).status).toBe(403);
@@ -124,5 +134,8 @@ test('failures to sign in are counted and end in a refusal that says when to com
     await refuseAbove('signInFailure', key);
     await countAgainst('signInFailure', key);
   }
-  await expect(refuseAbove('signInFailure', key)).rejects.toMatchObject({ kind: 'tooMany', retryAfterS: expect.any(Number) });
+  await expect(refuseAbove('signInFailure', key)).rejects.toMatchObject({
+    kind: 'tooMany',
+    retryAfterS: expect.any(Number),
+  });
 });

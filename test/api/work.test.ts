@@ -11,19 +11,26 @@ import { forkEm } from '@/src/db';
 import { executeRun } from '@/src/runs/execute-run';
 import type { RunItem } from '@/src/runs/schema';
 import { call, json } from './call';
-import { useOwnDatabase } from './own-database';
+import { withOwnDatabase } from './own-database';
 import { newGroup, newMember, type Member } from './people';
 import { circular } from './runs';
 import { uploaded, uploadForm } from './upload';
 
-useOwnDatabase();
+withOwnDatabase();
 
 let member: Member;
 let catalogueId: string;
-const request = (extra: object = {}) => ({ catalogueId, starSlug: 'sun', release: circular, optics: { model: 'constant', qpr: 1 }, ...extra });
+const request = (extra: object = {}) => ({
+  catalogueId,
+  starSlug: 'sun',
+  release: circular,
+  optics: { model: 'constant', qpr: 1 },
+  ...extra,
+});
 const newRun = async () => (await json<{ id: string }>(call(postRun, { as: member, json: request() }), 202)).id;
 const runNow = (id: string) => json<RunItem>(call(getRun, { as: member, params: { id } }));
-const jobsFor = async (id: string) => (await (await forkEm()).execute(`select id from pgboss.job where data->>'id' = ?`, [id])).length;
+const jobsFor = async (id: string) =>
+  (await (await forkEm()).execute(`select id from pgboss.job where data->>'id' = ?`, [id])).length;
 
 beforeAll(async () => {
   member = await newMember(await newGroup(), 'researcher');
@@ -94,9 +101,18 @@ describe('a catalogue whose check is claimed twice', () => {
   });
 
   test('with more rows than allowed is refused and keeps none', async () => {
-    const { id } = await json<{ id: string }>(call(postCatalogue, { as: member, form: uploadForm({ file: `radius_um,density_g_cm3,material\n${'1,2,astrosil\n'.repeat(20)}` }) }), 202);
+    const { id } = await json<{ id: string }>(
+      call(postCatalogue, {
+        as: member,
+        form: uploadForm({ file: `radius_um,density_g_cm3,material\n${'1,2,astrosil\n'.repeat(20)}` }),
+      }),
+      202,
+    );
     await checkCatalogue(await forkEm(), id, { maxRows: 10 });
-    expect(await (await forkEm()).findOneOrFail(Catalogue, { id })).toMatchObject({ status: 'failed', failure: expect.stringMatching(/10/) });
+    expect(await (await forkEm()).findOneOrFail(Catalogue, { id })).toMatchObject({
+      status: 'failed',
+      failure: expect.stringMatching(/10/),
+    });
     expect(await (await forkEm()).count(Grain, { catalogue: id })).toBe(0);
   });
 });
@@ -106,7 +122,16 @@ describe('what a run was made with', () => {
     const id = await newRun();
     const em = await forkEm();
     const star = await em.findOneOrFail(Star, { slug: 'sun', group: null });
-    em.create(StarVersion, { star, version: 2, status: 'published', name: 'Sun', massSun: 1, luminositySun: 1.1, teffK: 5772, citation: 'a test' });
+    em.create(StarVersion, {
+      star,
+      version: 2,
+      status: 'published',
+      name: 'Sun',
+      massSun: 1,
+      luminositySun: 1.1,
+      teffK: 5772,
+      citation: 'a test',
+    });
     await em.flush();
     await executeRun(await forkEm(), id);
     expect((await runNow(id)).inputs).toMatchObject({ star: { version: 1, luminositySun: 1 } });
@@ -129,10 +154,18 @@ describe('a request for a run', () => {
     ['an eccentricity of one', { release: { ...circular, eccentricity: 1 } }, 400, '/release/eccentricity'],
     ['an anomaly without an angle', { release: { ...circular, at: 'anomaly' } }, 400, '/release/trueAnomalyDeg'],
     ['constant optics without Q_pr', { optics: { model: 'constant' } }, 400, '/optics/qpr'],
-    ['a mantle of nothing known', { optics: { model: 'mie', mantle: { material: 'slime', volumeFraction: 0.2 } } }, 422, '/optics/mantle/material'],
+    [
+      'a mantle of nothing known',
+      { optics: { model: 'mie', mantle: { material: 'slime', volumeFraction: 0.2 } } },
+      422,
+      '/optics/mantle/material',
+    ],
     ['a field that does not exist', { colour: 'red' }, 400, '/'],
   ])('with %s is refused and points at it', async (_, extra, status, pointer) => {
-    const problem = await json<{ errors: { pointer: string }[] }>(call(postRun, { as: member, json: request(extra) }), status);
+    const problem = await json<{ errors: { pointer: string }[] }>(
+      call(postRun, { as: member, json: request(extra) }),
+      status,
+    );
     expect(problem.errors.map((error) => error.pointer)).toContain(pointer);
   });
 

@@ -21,7 +21,7 @@ export const looks: Look[] = [
 ];
 
 /** One browser per test file; each visit is a context of its own and notes what the console complained of. */
-export function useBrowser() {
+export function withBrowser() {
   let browser: Browser;
   beforeAll(async () => {
     browser = await chromium.launch({ executablePath: '/usr/bin/chromium', args: flags });

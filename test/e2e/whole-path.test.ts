@@ -1,8 +1,8 @@
 import { readFileSync } from 'node:fs';
 import { describe, expect, test } from 'vitest';
-import { expectSound, looks, signUp, useBrowser } from './browser';
+import { expectSound, looks, signUp, withBrowser } from './browser';
 
-const { visit } = useBrowser();
+const { visit } = withBrowser();
 
 const csv = [
   'label,diameter_um,diameter_um_sigma,density_g_cm3,material',

@@ -8,10 +8,11 @@ import { Notice } from '@/src/ui/notice';
 import { PasswordField } from '@/src/ui/password-field';
 import { signInAction } from './actions';
 
-export function SignInForm() {
+export function SignInForm({ next }: { next: string }) {
   const [state, send, isSending] = useActionState(signInAction, {});
   return (
     <form action={send} className="grid gap-5">
+      <input type="hidden" name="next" value={next} />
       <div aria-live="polite">{state.message && <Notice kind="danger">{state.message}</Notice>}</div>
       <FormField
         name="email"

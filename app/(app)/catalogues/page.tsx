@@ -5,15 +5,22 @@ import { listCatalogues } from '@/src/catalogues/find-catalogues';
 import { CatalogueTable } from '@/src/ui/catalogue-table';
 import { EmptyState } from '@/src/ui/empty-state';
 import { LinkButton } from '@/src/ui/link-button';
+import { NoGroup } from '@/src/ui/no-group';
 import { PageHeader } from '@/src/ui/page-header';
 import { pageActor, pageEm } from '@/src/web/page';
+import { onlyOne, orNowhere } from '../nowhere';
 
 export const metadata: Metadata = { title: 'Catalogues' };
 
-export default async function CataloguesPage({ searchParams }: { searchParams: Promise<{ after?: string }> }) {
+export default async function CataloguesPage({
+  searchParams,
+}: {
+  searchParams: Promise<{ after?: string | string[] }>;
+}) {
   const actor = await pageActor();
-  const { after } = await searchParams;
-  const page = await listCatalogues(await pageEm(), actor, { limit: 50, after });
+  if (!may(actor, 'catalogue.read')) return <NoGroup title="Catalogues" />;
+  const after = onlyOne((await searchParams).after);
+  const page = await orNowhere(listCatalogues(await pageEm(), actor, { limit: 50, after }));
   const upload = may(actor, 'catalogue.upload') && (
     <LinkButton href="/catalogues/new" variant="primary">
       New catalogue

@@ -6,7 +6,7 @@ import { listRuns } from '@/src/runs/find-runs';
 import { CatalogueTable } from '@/src/ui/catalogue-table';
 import { EmptyState } from '@/src/ui/empty-state';
 import { LinkButton } from '@/src/ui/link-button';
-import { Notice } from '@/src/ui/notice';
+import { NoGroup } from '@/src/ui/no-group';
 import { PageHeader } from '@/src/ui/page-header';
 import { RunList } from '@/src/ui/run-list';
 import { RunSection } from '@/src/ui/run-section';
@@ -18,16 +18,7 @@ const shown = 5;
 
 export default async function HomePage() {
   const actor = await pageActor();
-  if (!may(actor, 'catalogue.read')) {
-    return (
-      <>
-        <PageHeader title={`Welcome, ${actor.name}`} />
-        <Notice kind="info" title="You are in no group">
-          Catalogues and runs belong to a group. Stars, materials and the calculator are open to you.
-        </Notice>
-      </>
-    );
-  }
+  if (!may(actor, 'catalogue.read')) return <NoGroup title={`Welcome, ${actor.name}`} />;
   const em = await pageEm();
   const catalogues = await listCatalogues(em, actor, { limit: shown });
   const runs = await listRuns(em, actor, { limit: shown });

@@ -1,10 +1,13 @@
 import type { Metadata } from 'next';
+import { notFound } from 'next/navigation';
+import { may } from '@/src/access/policy';
 import { findCatalogue } from '@/src/catalogues/find-catalogues';
 import { listRuns } from '@/src/runs/find-runs';
 import { PageHeader } from '@/src/ui/page-header';
 import { RunList } from '@/src/ui/run-list';
 import { RunSection } from '@/src/ui/run-section';
 import { orNotFound, pageActor, pageEm } from '@/src/web/page';
+import { idOrNowhere } from '../../nowhere';
 import { CatalogueLive } from './catalogue-live';
 
 type Props = { params: Promise<{ id: string }> };
@@ -13,7 +16,9 @@ const shownRuns = 20;
 
 async function catalogueOf({ params }: Props) {
   const actor = await pageActor();
-  return orNotFound(findCatalogue(await pageEm(), actor, (await params).id));
+  if (!may(actor, 'catalogue.read')) notFound();
+  const id = idOrNowhere((await params).id);
+  return orNotFound(findCatalogue(await pageEm(), actor, id));
 }
 
 export async function generateMetadata(props: Props): Promise<Metadata> {

@@ -3,23 +3,33 @@
 import { useInfiniteQuery } from '@tanstack/react-query';
 import type { RejectItem } from '@/src/catalogues/schema';
 import { Button } from '@/src/ui/button';
+import { DataTable, type DataColumn } from '@/src/ui/data-table';
 import { LinkButton } from '@/src/ui/link-button';
-import { apiGet, worthAskingAgain } from '@/src/ui/run-api';
+import { Notice } from '@/src/ui/notice';
+import { apiGet, sayProblem, worthAskingAgain } from '@/src/ui/run-api';
 import { RunSection } from '@/src/ui/run-section';
 
 type Page = { items: RejectItem[]; next: string | null; total: number };
 
 const perPage = 25;
 
+const columns: DataColumn<RejectItem>[] = [
+  { header: 'Line', show: ({ line }) => <span className="whitespace-nowrap tabular-nums">Line {line}</span> },
+  { header: 'Column', show: ({ column }) => <span className="font-mono break-all">{column ?? '—'}</span> },
+  {
+    header: 'Value',
+    show: ({ value }) => <span className="block max-w-64 font-mono break-all">{value ?? '—'}</span>,
+  },
+  { header: 'Reason', show: ({ reason }) => reason },
+];
+
 /** The rows that were not accepted: where, what was seen, and why. */
 export function RejectTable({ catalogueId, rejectedRows }: { catalogueId: string; rejectedRows: number }) {
-  const { data, hasNextPage, fetchNextPage, isFetchingNextPage } = useInfiniteQuery({
+  const path = `/api/v1/catalogues/${catalogueId}/rejects`;
+  const { data, error, hasNextPage, fetchNextPage, isFetchingNextPage } = useInfiniteQuery({
     queryKey: ['rejects', catalogueId],
     queryFn: ({ pageParam, signal }) =>
-      apiGet<Page>(
-        `/api/v1/catalogues/${catalogueId}/rejects?limit=${perPage}${pageParam ? `&after=${encodeURIComponent(pageParam)}` : ''}`,
-        signal,
-      ),
+      apiGet<Page>(`${path}?limit=${perPage}${pageParam ? `&after=${encodeURIComponent(pageParam)}` : ''}`, signal),
     initialPageParam: '',
     getNextPageParam: ({ next }) => next ?? undefined,
     retry: worthAskingAgain,
@@ -28,46 +38,28 @@ export function RejectTable({ catalogueId, rejectedRows }: { catalogueId: string
   return (
     <RunSection id="rejects" title={`Rows that were not accepted: ${rejectedRows.toLocaleString('en-US')}`}>
       <div className="mb-4">
-        <LinkButton href={`/api/v1/catalogues/${catalogueId}/rejects.csv`} download size="small">
+        <LinkButton href={`${path}.csv`} download size="small">
           Download the list (CSV)
         </LinkButton>
       </div>
-      <div className="overflow-x-auto" tabIndex={0} role="region" aria-label="Rejected rows">
-        <table className="w-full min-w-[40rem] text-sm">
-          <caption className="sr-only">Rejected rows with line, column, value and reason</caption>
-          <thead className="text-muted text-left">
-            <tr>
-              <th scope="col" className="w-px py-1.5 pr-6 text-right font-medium">
-                Line
-              </th>
-              <th scope="col" className="py-1.5 pr-6 font-medium">
-                Column
-              </th>
-              <th scope="col" className="py-1.5 pr-6 font-medium">
-                Value
-              </th>
-              <th scope="col" className="py-1.5 font-medium">
-                Reason
-              </th>
-            </tr>
-          </thead>
-          <tbody>
-            {items.map((item) => (
-              <tr key={item.ordinal} className="border-line border-t align-top">
-                <td className="py-2 pr-6 text-right font-mono tabular-nums">{item.line}</td>
-                <td className="py-2 pr-6 font-mono break-all">{item.column ?? '—'}</td>
-                <td className="max-w-64 py-2 pr-6 font-mono break-all">{item.value ?? '—'}</td>
-                <td className="py-2">{item.reason}</td>
-              </tr>
-            ))}
-          </tbody>
-        </table>
-      </div>
+      {items.length > 0 && (
+        <DataTable
+          caption="Rows that were not accepted"
+          columns={columns}
+          rows={items}
+          rowKey={({ ordinal }) => String(ordinal)}
+          minWidth="sm:min-w-[40rem]"
+        />
+      )}
+      {error !== null && <Notice kind="danger">{sayProblem(error)}</Notice>}
       {hasNextPage && (
-        <div className="mt-4">
+        <div className="mt-4 flex flex-wrap items-center gap-3">
           <Button size="small" onClick={() => void fetchNextPage()} disabled={isFetchingNextPage}>
             Show more
           </Button>
+          <p className="text-muted text-sm" role="status">
+            The first {items.length} are shown.
+          </p>
         </div>
       )}
     </RunSection>

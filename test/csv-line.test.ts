@@ -1,7 +1,7 @@
 import fc from 'fast-check';
 import Papa from 'papaparse';
 import { describe, expect, test } from 'vitest';
-import { csvLine } from '@/src/catalogues/csv-line';
+import { csvLine } from '@/src/csv-line';
 import { rejectsCsvHeader, rejectToCsvLine } from '@/src/catalogues/rejects-csv';
 
 describe('lines of CSV that we write', () => {
