@@ -1,9 +1,11 @@
+export { AccountLink } from './account-link';
 export { Catalogue } from './catalogue';
 export { CatalogueChunk } from './catalogue-chunk';
 export { ChangeRecord } from './change-record';
 export { Curve } from './curve';
 export { Grain } from './grain';
 export { Invitation } from './invitation';
+export { Mail } from './mail';
 export { Material } from './material';
 export { MaterialVersion } from './material-version';
 export { Membership } from './membership';

@@ -11,6 +11,7 @@ export const Person = defineEntity({
     passwordHash: p.text().hidden(),
     platformRole: p.enum(['member', 'admin']).default('member'),
     createdAt: createdAt(),
+    emailVerifiedAt: moment().nullable(),
     disabledAt: moment().nullable(),
   },
   checks: [{ name: 'person_email_lower_case', expression: 'email = lower(email)' }],

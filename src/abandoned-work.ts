@@ -7,6 +7,8 @@ const abandoned: Record<QueueName, string> = {
     where status = 'checking' and coalesce(heartbeat_at, created_at) < now() - make_interval(secs => ?)`,
   [queues.executeRun]: `select id from run t
     where status in ('queued', 'running') and coalesce(heartbeat_at, created_at) < now() - make_interval(secs => ?)`,
+  [queues.sendMail]: `select id from mail t
+    where status in ('queued', 'sending') and coalesce(heartbeat_at, created_at) < now() - make_interval(secs => ?)`,
 };
 
 /** Sends again what shows no sign of life and is not waiting in the queue either. Says how many there were. */

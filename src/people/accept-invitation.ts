@@ -40,7 +40,12 @@ export async function acceptAsNewPerson(
   return em.transactional(async (tx) => {
     const offer = await openInvitation(tx, secret);
     if (offer.hasAccount) throw new Refusal('conflict', 'There is an account with this address. Sign in to accept.');
-    const person = tx.create(Person, { name: input.name, email: offer.email, passwordHash });
+    const person = tx.create(Person, {
+      name: input.name,
+      email: offer.email,
+      passwordHash,
+      emailVerifiedAt: new Date(),
+    });
     await tx.flush();
     return join(tx, offer, { personId: person.id, name: person.name });
   });

@@ -6,11 +6,15 @@ import type { Actor } from '@/src/access/actor';
 import { demand, ofOwnGroup } from '@/src/access/policy';
 import { recordChange } from '@/src/audit/record-change';
 import { notFound, Refusal } from '@/src/errors';
+import { queueMail } from '@/src/mail/queue-mail';
 import { lockGroup } from './lock-group';
 import { newSecret, secretDigest } from './secrets';
 import { email } from './sign-up';
+import type { LinkMaker } from './verify-address';
 
 export const inviteInput = z.object({ email, role: z.enum(groupRoles) });
+
+const invitedAs = { pi: 'principal investigator', researcher: 'researcher', student: 'student' };
 
 const validForMs = 14 * 86_400_000;
 
@@ -19,6 +23,7 @@ export async function invite(
   em: EntityManager,
   actor: Actor,
   input: z.infer<typeof inviteInput>,
+  linkTo: LinkMaker,
 ): Promise<{ id: string; secret: string; expiresAt: Date }> {
   demand(actor, 'group.manage');
   return em.transactional(async (tx) => {
@@ -47,8 +52,25 @@ export async function invite(
       after: { role: input.role },
     });
     await tx.flush();
+    await sendInvitation(tx, actor, invitation, linkTo(`/invitation/${secret}`));
     return { id: invitation.id, secret, expiresAt: invitation.expiresAt };
   });
+}
+
+async function sendInvitation(
+  tx: EntityManager,
+  actor: Actor,
+  { id, email: to, role, expiresAt }: Invitation,
+  link: string,
+): Promise<void> {
+  const data = {
+    groupName: actor.groupName ?? '',
+    inviterName: actor.name,
+    role: invitedAs[role],
+    link,
+    until: expiresAt.toISOString().slice(0, 10),
+  };
+  await queueMail(tx, { kind: 'invitation', to, data, dedupeKey: `invitation:${id}` });
 }
 
 export async function revokeInvitation(em: EntityManager, actor: Actor, id: string): Promise<void> {

@@ -13,7 +13,7 @@ declare module 'lucia' {
 
 export const sessionCookieName = '__Host-session';
 export const longestSession = new TimeSpan(30, 'd');
-const idleLimit = new TimeSpan(7, 'd');
+export const idleLimit = new TimeSpan(7, 'd');
 
 const luciaOf = (em: EntityManager) =>
   new Lucia(sessionAdapter(em), {
@@ -23,7 +23,7 @@ const luciaOf = (em: EntityManager) =>
     getUserAttributes: (attributes) => attributes,
   });
 
-const sessionIdOf = (secret: string) => createHash('sha256').update(secret).digest('hex');
+export const sessionIdOf = (secret: string) => createHash('sha256').update(secret).digest('hex');
 
 /** Makes a session and returns the secret for the cookie; the table keeps its hash alone. */
 export async function startSession(

@@ -4,6 +4,7 @@ import { Membership, Person, ResearchGroup } from '@/entities';
 import { recordChange } from '@/src/audit/record-change';
 import { Refusal } from '@/src/errors';
 import { checkNewPassword, hashPassword } from './passwords';
+import { sendVerification, type LinkMaker } from './verify-address';
 
 export const email = z.string().trim().toLowerCase().max(254).pipe(z.email('does not look like an e-mail address'));
 
@@ -16,7 +17,11 @@ export const signUpInput = z.object({
 export type SignUpInput = z.infer<typeof signUpInput>;
 
 /** A new person with a group of their own, of which they are the principal investigator. */
-export async function signUp(em: EntityManager, input: SignUpInput): Promise<{ personId: string; groupId: string }> {
+export async function signUp(
+  em: EntityManager,
+  input: SignUpInput,
+  linkTo: LinkMaker,
+): Promise<{ personId: string; groupId: string }> {
   checkNewPassword(input.password);
   const passwordHash = await hashPassword(input.password);
   try {
@@ -31,6 +36,7 @@ export async function signUp(em: EntityManager, input: SignUpInput): Promise<{ p
         { action: 'account.signUp', target: { kind: 'group', id: group.id, name: group.name }, groupId: group.id },
       );
       await tx.flush();
+      await sendVerification(tx, person, linkTo);
       return { personId: person.id, groupId: group.id };
     });
   } catch (error) {

@@ -16,8 +16,12 @@ export const pageEm = cache(async (): Promise<EntityManager> => {
   return forkEm();
 });
 
+export async function sessionSecret(): Promise<string | undefined> {
+  return (await cookies()).get(sessionCookieName)?.value;
+}
+
 export const optionalActor = cache(async (): Promise<Actor | null> => {
-  const secret = (await cookies()).get(sessionCookieName)?.value;
+  const secret = await sessionSecret();
   return secret ? actorOfSession(await pageEm(), secret) : null;
 });
 

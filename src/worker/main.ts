@@ -3,6 +3,7 @@ import { checkCatalogue } from '@/src/catalogues/check-catalogue';
 import { closeOrm, forkEm, orm } from '@/src/db';
 import { env } from '@/src/env';
 import { log } from '@/src/log';
+import { sendMail } from '@/src/mail/send-mail';
 import { queues, type QueueName } from '@/src/queue';
 import { executeRun } from '@/src/runs/execute-run';
 import { closeThreads } from '@/src/runs/curve-threads';
@@ -32,6 +33,7 @@ async function take(queue: QueueName, handle: (id: string) => Promise<void>): Pr
 
 await take(queues.importCatalogue, async (id) => checkCatalogue(await forkEm(), id, { maxRows: CHAFFLINE_MAX_ROWS }));
 await take(queues.executeRun, async (id) => executeRun(await forkEm(), id));
+await take(queues.sendMail, async (id) => sendMail(await forkEm(), id));
 const stopSweeping = startSweeping();
 log.info('worker is ready');
 

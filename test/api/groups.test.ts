@@ -20,6 +20,7 @@ import { uploaded } from './upload';
 
 withOwnDatabase();
 
+const linkTo = (path: string) => `http://localhost${path}`;
 const password = 'grains drift away';
 let groupId: string;
 let pi: Member;
@@ -31,12 +32,12 @@ beforeEach(async () => {
   student = await newMember(groupId, 'student');
 });
 
-const invited = async (email: string) => invite(await forkEm(), pi.actor, { email, role: 'researcher' });
+const invited = async (email: string) => invite(await forkEm(), pi.actor, { email, role: 'researcher' }, linkTo);
 const refusal = (kind: string) => expect.objectContaining({ kind });
 
 describe('an invitation', () => {
   test('is made by a principal investigator alone', async () => {
-    await expect(invite(await forkEm(), student.actor, { email: 'x@example.org', role: 'pi' })).rejects.toEqual(
+    await expect(invite(await forkEm(), student.actor, { email: 'x@example.org', role: 'pi' }, linkTo)).rejects.toEqual(
       refusal('forbidden'),
     );
     const { secret } = await invited('new1@example.org');

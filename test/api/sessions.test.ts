@@ -16,10 +16,11 @@ import { newGroup, newMember } from './people';
 withOwnDatabase();
 
 const password = 'grains drift away';
+const linkTo = (path: string) => `http://localhost${path}`;
 let made = 0;
 const newPerson = async () => {
   const email = `Someone${++made}@Example.org`.toLowerCase();
-  const who = await signUp(await forkEm(), { name: 'Someone', email, password, groupName: 'A group' });
+  const who = await signUp(await forkEm(), { name: 'Someone', email, password, groupName: 'A group' }, linkTo);
   return { email, ...who };
 };
 const cookie = (secret: string) => ({ cookie: `other=1; ${sessionCookieName}=${secret}` });
@@ -52,13 +53,17 @@ describe('signing up and in', () => {
   });
 
   test.each(['short', 'aaaaaaaaaaaaaaaa', 'x'.repeat(300)])('refuses the password %s', async (weak) => {
-    const attempt = signUp(await forkEm(), { name: 'A', email: 'weak@example.org', password: weak, groupName: 'G' });
+    const attempt = signUp(
+      await forkEm(),
+      { name: 'A', email: 'weak@example.org', password: weak, groupName: 'G' },
+      linkTo,
+    );
     await expect(attempt).rejects.toMatchObject({ kind: 'invalid', problems: [{ pointer: '/password' }] });
   });
 
   test('does not take an address twice', async () => {
     const { email } = await newPerson();
-    await expect(signUp(await forkEm(), { name: 'B', email, password, groupName: 'G' })).rejects.toMatchObject({
+    await expect(signUp(await forkEm(), { name: 'B', email, password, groupName: 'G' }, linkTo)).rejects.toMatchObject({
       kind: 'conflict',
     });
   });

@@ -31,7 +31,7 @@ export default async function setup(project: TestProject) {
     DATABASE_URL: url,
     PUBLIC_URL: `http://localhost:${port}`,
     CHAFFLINE_SECRET: 'a secret for tests alone, of thirty-two characters and more',
-    CHAFFLINE_DEMO: '0',
+    CHAFFLINE_DEMO: '1',
   };
   mkdirSync(logs, { recursive: true });
   const web = start('web', ['node_modules/next/dist/bin/next', 'start', '-H', '127.0.0.1', '-p', String(port)], env);

@@ -28,6 +28,11 @@ export function SignInForm({ next }: { next: string }) {
         {isSending ? 'Signing in ...' : 'Sign in'}
       </Button>
       <p className="text-muted text-sm">
+        <Link href="/forgotten" className="prose-link">
+          Forgotten the password?
+        </Link>
+      </p>
+      <p className="text-muted text-sm">
         No account yet?{' '}
         <Link href="/sign-up" className="prose-link">
           Sign up and start a group

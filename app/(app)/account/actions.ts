@@ -2,12 +2,16 @@
 
 import { revalidatePath } from 'next/cache';
 import { z } from 'zod';
+import { changePassword, changePasswordInput } from '@/src/people/change-password';
+import { endOwnSession } from '@/src/people/own-sessions';
 import { makeToken, revokeToken } from '@/src/people/tokens';
-import { formAction } from '@/src/web/action';
+import { sendVerificationAgain } from '@/src/people/verify-address';
+import { formAction, openSession } from '@/src/web/action';
 import type { FormState } from '@/src/web/form-state';
 import { pageActor, pageEm } from '@/src/web/page';
 import { parseForm } from '@/src/web/parse-form';
-import { countAgainst } from '@/src/web/rate-limit';
+import { publicUrl } from '@/src/web/public-url';
+import { countAgainst, countFailure, refuseAbove } from '@/src/web/rate-limit';
 
 const tokenForm = z.object({
   name: z.string().trim().min(1, 'is needed').max(100),
@@ -39,5 +43,37 @@ export async function revokeTokenAction(_state: FormState, form: FormData): Prom
     await revokeToken(await pageEm(), actor, id);
     revalidatePath('/account');
     return {};
+  });
+}
+
+export type PasswordState = FormState & { changed?: boolean };
+
+export async function changePasswordAction(_state: PasswordState, form: FormData): Promise<PasswordState> {
+  return formAction<PasswordState>(form, async () => {
+    const actor = await pageActor();
+    await refuseAbove('signInFailure', actor.email);
+    const input = parseForm(changePasswordInput, form);
+    await countFailure('signInFailure', actor.email, changePassword(await pageEm(), actor, input));
+    await openSession(actor.personId, actor.groupId);
+    revalidatePath('/account');
+    return { changed: true };
+  });
+}
+
+export async function endSessionAction(_state: FormState, form: FormData): Promise<FormState> {
+  return formAction(form, async () => {
+    const { id } = parseForm(z.object({ id: z.string().regex(/^[0-9a-f]{64}$/) }), form);
+    await endOwnSession(await pageEm(), await pageActor(), id);
+    revalidatePath('/account');
+    return {};
+  });
+}
+
+export async function sendVerificationAction(_state: FormState, form: FormData): Promise<FormState> {
+  return formAction(form, async () => {
+    const actor = await pageActor();
+    await countAgainst('accountMail', actor.email);
+    await sendVerificationAgain(await pageEm(), actor, publicUrl);
+    return { message: 'The message is on its way.' };
   });
 }

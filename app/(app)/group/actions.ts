@@ -21,7 +21,7 @@ export async function inviteAction(_state: InviteState, form: FormData): Promise
     const actor = await pageActor();
     const input = parseForm(inviteInput, form);
     await countAgainst('invitation', actor.personId);
-    const { secret } = await invite(await pageEm(), actor, input);
+    const { secret } = await invite(await pageEm(), actor, input, publicUrl);
     revalidatePath('/group');
     return { link: publicUrl(`/invitation/${secret}`), email: input.email };
   });

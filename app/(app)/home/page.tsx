@@ -43,11 +43,14 @@ export default async function HomePage() {
         <EmptyState
           title="Begin with a catalogue"
           action={
-            may(actor, 'catalogue.upload') && (
-              <LinkButton href="/catalogues/new" variant="primary">
-                Upload a catalogue
-              </LinkButton>
-            )
+            <div className="flex flex-wrap gap-3">
+              {may(actor, 'catalogue.upload') && (
+                <LinkButton href="/catalogues/new" variant="primary">
+                  Upload a catalogue
+                </LinkButton>
+              )}
+              <LinkButton href="/calculator">Try the calculator first</LinkButton>
+            </div>
           }
         >
           Upload a CSV file with one row per grain: radius, density, material, and errors where you have them. Then

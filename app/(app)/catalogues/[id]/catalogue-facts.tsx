@@ -24,7 +24,7 @@ export function CatalogueFacts({ catalogue }: { catalogue: CatalogueItem }) {
     <dl className="grid gap-x-8 gap-y-2 sm:grid-cols-[max-content_minmax(0,1fr)]">
       {facts.map(([term, value]) => (
         <div key={term} className="contents">
-          <dt className="text-muted">{term}</dt>
+          <dt className="text-muted max-sm:mt-1 max-sm:-mb-1.5">{term}</dt>
           <dd className="min-w-0">{value}</dd>
         </div>
       ))}
