@@ -9,6 +9,13 @@ const fixedHeaders = [
   { key: 'Strict-Transport-Security', value: 'max-age=31536000' },
 ];
 
+/** Addresses that are secrets: not indexed, not passed on, not kept. */
+const secretLinkHeaders = [
+  { key: 'Referrer-Policy', value: 'no-referrer' },
+  { key: 'X-Robots-Tag', value: 'noindex, nofollow' },
+  { key: 'Cache-Control', value: 'private, no-store' },
+];
+
 /** @type {import('next').NextConfig} */
 const config = {
   distDir: process.env.CHAFFLINE_NEXT_DIR ?? '.next',
@@ -17,7 +24,11 @@ const config = {
   // npm test checks the types of everything; a user who starts the product need not wait for it.
   typescript: { ignoreBuildErrors: true },
   async headers() {
-    return [{ source: '/:path*', headers: fixedHeaders }];
+    return [
+      { source: '/:path*', headers: fixedHeaders },
+      // After the general ones: the last value of a header counts.
+      ...['/s/:path*', '/api/s/:path*', '/reset/:path*', '/verify/:path*', '/invitation/:path*'].map((source) => ({ source, headers: secretLinkHeaders })),
+    ];
   },
   // Code that reads files beside itself or loads native parts must not be bundled.
   serverExternalPackages: [

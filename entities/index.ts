@@ -16,5 +16,6 @@ export { ResearchGroup } from './research-group';
 export { Run } from './run';
 export { RunGrain } from './run-grain';
 export { Session } from './session';
+export { Share } from './share';
 export { Star } from './star';
 export { StarVersion } from './star-version';

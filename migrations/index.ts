@@ -1,6 +1,7 @@
 import type { MigrationObject } from '@mikro-orm/core';
 import { ChangeRecordTable } from './m20261201-change-record';
 import { MailTables } from './m20261201-mail';
+import { ShareTable } from './m20261201-share';
 import { House } from './m20261201-house';
 import { InvitationTable } from './m20261201-invitation';
 
@@ -10,4 +11,5 @@ export const migrations: MigrationObject[] = [
   { name: 'm20261201a-change-record', class: ChangeRecordTable },
   { name: 'm20261201b-invitation', class: InvitationTable },
   { name: 'm20261201c-mail', class: MailTables },
+  { name: 'm20261201d-share', class: ShareTable },
 ];

@@ -2,7 +2,11 @@ import type { EntityManager } from '@mikro-orm/postgresql';
 import type { ClientBase } from 'pg';
 import PgBoss from 'pg-boss';
 
-export const queues = { importCatalogue: 'import-catalogue', executeRun: 'execute-run', sendMail: 'send-mail' } as const;
+export const queues = {
+  importCatalogue: 'import-catalogue',
+  executeRun: 'execute-run',
+  sendMail: 'send-mail',
+} as const;
 export type QueueName = (typeof queues)[keyof typeof queues];
 
 /** The very connection of the open transaction: what is sent through it rolls back with it. Do not release it. */

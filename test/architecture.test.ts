@@ -9,7 +9,9 @@ const areas = ['catalogues', 'runs', 'stars', 'materials', 'people', 'sharing', 
 /** What areas stand on, beside physics, access and entities: errors, environment, log, queue, claims, and the COPY writer. */
 const ground = ['src/errors', 'src/env', 'src/log', 'src/queue', 'src/claim', 'src/copy', 'src/csv-line'];
 
-const sources = ['app', 'src', 'entities', 'migrations', 'fixtures'].flatMap((folder) => filesBelow(join(root, folder)));
+const sources = ['app', 'src', 'entities', 'migrations', 'fixtures'].flatMap((folder) =>
+  filesBelow(join(root, folder)),
+);
 
 function filesBelow(folder: string): string[] {
   return readdirSync(folder).flatMap((name) => {
@@ -24,8 +26,14 @@ type Import = { from: string; to: string; isType: boolean };
 /** Imports of one file: our own as paths from the root, packages by name. */
 function importsOf(file: string): Import[] {
   const text = readFileSync(join(root, file), 'utf8');
-  const found = text.matchAll(/^\s*(?:import|export)\s+(type\s+)?(?:[^'";]*?\sfrom\s+)?'([^']+)'|\bimport\(\s*'([^']+)'\s*\)/gm);
-  return [...found].map(([, type, fixed, dynamic]) => ({ from: file, to: target(file, fixed ?? dynamic), isType: type !== undefined }));
+  const found = text.matchAll(
+    /^\s*(?:import|export)\s+(type\s+)?(?:[^'";]*?\sfrom\s+)?'([^']+)'|\bimport\(\s*'([^']+)'\s*\)/gm,
+  );
+  return [...found].map(([, type, fixed, dynamic]) => ({
+    from: file,
+    to: target(file, fixed ?? dynamic),
+    isType: type !== undefined,
+  }));
 }
 
 function target(file: string, specifier: string): string {
@@ -35,7 +43,8 @@ function target(file: string, specifier: string): string {
 }
 
 const imports = sources.flatMap(importsOf);
-const within = (path: string, ...folders: string[]) => folders.some((folder) => path === folder || path.startsWith(`${folder}/`));
+const within = (path: string, ...folders: string[]) =>
+  folders.some((folder) => path === folder || path.startsWith(`${folder}/`));
 const isOurs = (path: string) => within(path, 'app', 'src', 'entities', 'migrations', 'fixtures');
 const show = ({ from, to }: Import) => `${from} -> ${to}`;
 
@@ -55,15 +64,24 @@ describe('directions', () => {
   });
 
   test('entities import entities', () => {
-    expect(strays('entities', (to) => within(to, 'entities') || to === '@mikro-orm/core' || to === 'node:crypto')).toEqual([]);
+    expect(
+      strays('entities', (to) => within(to, 'entities') || to === '@mikro-orm/core' || to === 'node:crypto'),
+    ).toEqual([]);
   });
 
-  test.each(areas.map((area) => `src/${area}`).filter((folder) => sources.some((file) => within(file, folder))))('%s imports what areas may', (folder) => {
-    const allowed = ['src/physics', 'src/access', 'entities', ...ground, ...areas.map((area) => `src/${area}`)];
-    const isFixture = (to: string, { isType }: Import) => isType && within(to, 'fixtures');
-    const isForbiddenPackage = (to: string) => /^(next|react|server-only)(\/|$)/.test(to);
-    expect(strays(folder, (to, one) => (isOurs(to) ? within(to, ...allowed) || isFixture(to, one) : !isForbiddenPackage(to)))).toEqual([]);
-  });
+  test.each(areas.map((area) => `src/${area}`).filter((folder) => sources.some((file) => within(file, folder))))(
+    '%s imports what areas may',
+    (folder) => {
+      const allowed = ['src/physics', 'src/access', 'entities', ...ground, ...areas.map((area) => `src/${area}`)];
+      const isFixture = (to: string, { isType }: Import) => isType && within(to, 'fixtures');
+      const isForbiddenPackage = (to: string) => /^(next|react|server-only)(\/|$)/.test(to);
+      expect(
+        strays(folder, (to, one) =>
+          isOurs(to) ? within(to, ...allowed) || isFixture(to, one) : !isForbiddenPackage(to),
+        ),
+      ).toEqual([]);
+    },
+  );
 
   test('areas do not go in circles', () => {
     const areaOf = (path: string) => areas.find((area) => within(path, `src/${area}`));
@@ -89,23 +107,40 @@ describe('directions', () => {
 
   test('web wraps: access, database, errors, people for who is asking, and schemas of the areas', () => {
     const isSchema = (to: string) => /schema$|query$|mapping$/.test(to);
-    const allowed = ['src/web', 'src/access', 'src/people', 'src/db', 'src/errors', 'src/env', 'src/log'];
+    // A link that was shared is a way of asking, too.
+    const allowed = [
+      'src/web',
+      'src/access',
+      'src/people',
+      'src/sharing/open-share',
+      'src/db',
+      'src/errors',
+      'src/env',
+      'src/log',
+    ];
     expect(strays('src/web', (to) => !isOurs(to) || within(to, ...allowed) || isSchema(to))).toEqual([]);
   });
 
   test('the worker calls areas; never next, never app', () => {
     const allowed = ['src/worker', ...ground, 'src/db', 'src/abandoned-work', ...areas.map((area) => `src/${area}`)];
-    expect(strays('src/worker', (to) => (isOurs(to) ? within(to, ...allowed) : !/^(next|react)(\/|$)/.test(to)))).toEqual([]);
+    expect(
+      strays('src/worker', (to) => (isOurs(to) ? within(to, ...allowed) : !/^(next|react)(\/|$)/.test(to))),
+    ).toEqual([]);
   });
 
   test('components know physics, schemas and types; never the database', () => {
-    const isHarmless = (to: string, { isType }: Import) => isType || within(to, 'src/ui', 'src/physics') || /schema$|mapping$|preview-catalogue$/.test(to);
+    const isHarmless = (to: string, { isType }: Import) =>
+      isType || within(to, 'src/ui', 'src/physics') || /schema$|mapping$|preview-catalogue$/.test(to);
     expect(strays('src/ui', (to, one) => !isOurs(to) || isHarmless(to, one))).toEqual([]);
   });
 
   test('files for the browser do not reach the database, not even through others', () => {
-    const isServerOnly = (to: string) => within(to, 'src/db', 'src/queue', 'src/web/page', 'src/web/route', 'src/web/action') || /^(pg|pg-boss|@mikro-orm|node:)/.test(to);
-    const clients = sources.filter((file) => file.endsWith('.tsx') && readFileSync(join(root, file), 'utf8').startsWith("'use client'"));
+    const isServerOnly = (to: string) =>
+      within(to, 'src/db', 'src/queue', 'src/web/page', 'src/web/route', 'src/web/action') ||
+      /^(pg|pg-boss|@mikro-orm|node:)/.test(to);
+    const clients = sources.filter(
+      (file) => file.endsWith('.tsx') && readFileSync(join(root, file), 'utf8').startsWith("'use client'"),
+    );
     expect(clients.length).toBeGreaterThan(20);
     const byFile = grouped();
     const reached = (file: string, seen: Set<string>, path: string[]): string[] | undefined => {
@@ -141,11 +176,15 @@ function grouped(): Map<string, Import[]> {
 
 describe('the house', () => {
   test('has no drawers for odds and ends', () => {
-    expect(sources.filter((file) => /(^|\/)(utils?|helpers?|common|lib|services?|misc)(\/|\.tsx?$)/.test(file))).toEqual([]);
+    expect(
+      sources.filter((file) => /(^|\/)(utils?|helpers?|common|lib|services?|misc)(\/|\.tsx?$)/.test(file)),
+    ).toEqual([]);
   });
 
   test('has small files', () => {
-    const lines = sources.filter((file) => !within(file, 'migrations')).map((file) => readFileSync(join(root, file), 'utf8').split('\n').length);
+    const lines = sources
+      .filter((file) => !within(file, 'migrations'))
+      .map((file) => readFileSync(join(root, file), 'utf8').split('\n').length);
     lines.sort((a, b) => a - b);
     const quantile = (share: number) => lines[Math.floor(share * (lines.length - 1))];
     console.log(`lines per file: median ${quantile(0.5)}, 90 % ${quantile(0.9)}, most ${lines.at(-1)}`);

@@ -31,7 +31,13 @@ export default async function ShellLayout({ children }: { children: ReactNode })
           </Link>
           <div className="flex items-center gap-1">
             <ThemeSwitch />
-            <PersonMenu name={actor.name} groupName={actor.groupName} role={roleOf(actor)} links={linksOf(actor)} signOut={signOutAction} />
+            <PersonMenu
+              name={actor.name}
+              groupName={actor.groupName}
+              role={roleOf(actor)}
+              links={linksOf(actor)}
+              signOut={signOutAction}
+            />
           </div>
         </div>
         <Navigation items={places} />

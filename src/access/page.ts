@@ -36,7 +36,8 @@ export function newestFirst(after: string | undefined) {
   if (after === undefined) return {};
   const [createdAt, id] = decodeCursor(after, 2);
   const date = new Date(String(createdAt));
-  if (Number.isNaN(date.getTime())) throw new Refusal('invalid', 'The cursor `after` is not one of ours.');
+  const isId = /^[0-9a-f-]{36}$/.test(String(id));
+  if (Number.isNaN(date.getTime()) || !isId) throw new Refusal('invalid', 'The cursor `after` is not one of ours.');
   return { $or: [{ createdAt: { $lt: date } }, { createdAt: date, id: { $lt: String(id) } }] };
 }
 

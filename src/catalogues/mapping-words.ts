@@ -10,7 +10,8 @@ export const mappingWords = z
       if (typeof told !== 'string') return [column, told];
       if (told === 'ignore') return [column, { field: 'ignore' }];
       const reading = readHeaderName(told);
-      if (reading.kind === 'column') return [column, { field: reading.field, ...(reading.unit ? { unit: reading.unit.symbol } : {}) }];
+      if (reading.kind === 'column')
+        return [column, { field: reading.field, ...(reading.unit ? { unit: reading.unit.symbol } : {}) }];
       context.addIssue({ code: 'custom', path: [column], message: `"${told}" is not one of the understood names` });
       return [column, told];
     });

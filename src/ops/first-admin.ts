@@ -9,13 +9,20 @@ if (!email) {
   process.exit(2);
 }
 try {
-  const outcome = await (await forkEm()).transactional(async (tx) => {
+  const outcome = await (
+    await forkEm()
+  ).transactional(async (tx) => {
     await tx.execute('select pg_advisory_xact_lock(20261201)');
-    if ((await tx.count(Person, { platformRole: 'admin' })) > 0) return 'There is an administrator already: administrators make others.';
+    if ((await tx.count(Person, { platformRole: 'admin' })) > 0)
+      return 'There is an administrator already: administrators make others.';
     const person = await tx.findOne(Person, { email: email.trim().toLowerCase(), disabledAt: null });
     if (!person) return `Nobody has signed up as ${email}.`;
     person.platformRole = 'admin';
-    recordChange(tx, { personId: null, name: 'first-admin command' }, { action: 'admin.first', target: { kind: 'person', id: person.id, name: person.name }, groupId: null });
+    recordChange(
+      tx,
+      { personId: null, name: 'first-admin command' },
+      { action: 'admin.first', target: { kind: 'person', id: person.id, name: person.name }, groupId: null },
+    );
     return null;
   });
   if (outcome === null) console.log(`${email} is the first administrator.`);

@@ -16,7 +16,7 @@ export async function changePassword(
   actor: Actor,
   { oldPassword, password }: z.infer<typeof changePasswordInput>,
 ): Promise<void> {
-  const found = await em.findOneOrFail(Person, { id: actor.personId }, { populate: ['passwordHash'] });
+  const found = await em.findOneOrFail(Person, { id: actor.personId });
   if (!(await passwordMatches(oldPassword, found.passwordHash))) {
     const detail = 'This is not your password.';
     throw new Refusal('invalid', detail, [{ pointer: '/oldPassword', detail }]);

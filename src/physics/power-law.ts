@@ -17,7 +17,8 @@ export const sizeIndexOfMassIndex = (massIndex: number): number => 3 * massIndex
 export function powerLawShareBelow(size: number, { index, min, max }: PowerLaw, moment: number): number {
   const exponent = moment + 1 - index;
   const lnUpTo = (end: number) => Math.log(end / min);
-  const integral = (end: number) => (Math.abs(exponent) < 1e-12 ? lnUpTo(end) : Math.expm1(exponent * lnUpTo(end)) / exponent);
+  const integral = (end: number) =>
+    Math.abs(exponent) < 1e-12 ? lnUpTo(end) : Math.expm1(exponent * lnUpTo(end)) / exponent;
   return integral(Math.min(max, Math.max(min, size))) / integral(max);
 }
 
@@ -26,10 +27,15 @@ export function powerLawShareBelow(size: number, { index, min, max }: PowerLaw, 
  * standard error. Needs at least two sizes in the range that are not all equal to `min`; below about 50 the error is only indicative.
  * Source: Clauset, Shalizi & Newman (2009), SIAM Rev. 51, 661, eq. 3.1-3.2; truncated form by the same principle.
  */
-export function powerLawIndex(sizes: readonly number[], min: number, max?: number): { index: number; standardError: number } {
+export function powerLawIndex(
+  sizes: readonly number[],
+  min: number,
+  max?: number,
+): { index: number; standardError: number } {
   const inside = sizes.filter((size) => size >= min && (max === undefined || size <= max));
   const meanLn = inside.reduce((sum, size) => sum + Math.log(size / min), 0) / inside.length;
-  if (!(inside.length >= 2 && meanLn > 0)) throw new RangeError('A power law needs two sizes in its range, not all at the lower end.');
+  if (!(inside.length >= 2 && meanLn > 0))
+    throw new RangeError('A power law needs two sizes in its range, not all at the lower end.');
   if (max === undefined) return { index: 1 + 1 / meanLn, standardError: 1 / meanLn / Math.sqrt(inside.length) };
   const lnRange = Math.log(max / min);
   const reach = 700 / lnRange;

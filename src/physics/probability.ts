@@ -53,7 +53,11 @@ export function prepareProbability(
     }
     const integrand = (z: number) => normalDensity(z) * densityBelow(Math.exp(lnThreshold(lnRadius + lnSigma * z)));
     const crossings = windowsAt(Math.log(densityKgM3)).flat();
-    return overPanels(integrand, lnSigma, crossings.map((at) => (at - lnRadius) / lnSigma));
+    return overPanels(
+      integrand,
+      lnSigma,
+      crossings.map((at) => (at - lnRadius) / lnSigma),
+    );
   };
 }
 

@@ -1,7 +1,7 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import type { Actor } from '@/src/access/actor';
 import { csvLine } from '@/src/csv-line';
-import { finishedRun } from './finished-run';
+import { finishedRun, type FinishedRun } from './finished-run';
 import { runGrainFrom, runGrainItemOf, runGrainSelect, type RunGrainRow } from './run-grain-row';
 import type { RunGrainItem } from './schema';
 
@@ -29,15 +29,17 @@ const columns = {
 const fields = Object.keys(columns) as (keyof RunGrainItem)[];
 const rowsAtOnce = 2000;
 
+export type RunExport = { name: string; lines: AsyncGenerator<string> };
+
 /** All grains of a run as CSV, piece by piece. */
-export async function exportRun(
-  em: EntityManager,
-  actor: Actor,
-  id: string,
-): Promise<{ name: string; lines: AsyncGenerator<string> }> {
-  const run = await finishedRun(em, actor, id);
-  return { name: run.name, lines: csvOf(em, run.id, run.catalogue.id) };
+export async function exportRun(em: EntityManager, actor: Actor, id: string): Promise<RunExport> {
+  return exportOfRun(em, await finishedRun(em, actor, id));
 }
+
+export const exportOfRun = (em: EntityManager, run: FinishedRun): RunExport => ({
+  name: run.name,
+  lines: csvOf(em, run.id, run.catalogue.id),
+});
 
 async function* csvOf(em: EntityManager, runId: string, catalogueId: string): AsyncGenerator<string> {
   yield csvLine(Object.values(columns));

@@ -6,7 +6,7 @@ import { betaOf } from '@/src/physics/beta';
 import { qprAt } from '@/src/physics/curve';
 import { windFactors } from '@/src/physics/drag';
 import { recipeOf, spectrumOf } from './curve-ingredients';
-import { finishedRun } from './finished-run';
+import { finishedRun, type FinishedRun } from './finished-run';
 import { porosityOf } from './porosity-nodes';
 import { radiusSamplesUm } from './radius-samples';
 import { recentCurve } from './recent-curves';
@@ -14,7 +14,10 @@ import type { RunCurves } from './schema';
 
 /** The curves that the run used, for grains of each material's mean density. */
 export async function findRunCurves(em: EntityManager, actor: Actor, id: string): Promise<RunCurves> {
-  const { inputs, summary } = await finishedRun(em, actor, id);
+  return curvesOfRun(em, await finishedRun(em, actor, id));
+}
+
+export async function curvesOfRun(em: EntityManager, { inputs, summary }: FinishedRun): Promise<RunCurves> {
   const curves = await Promise.all(summary.perMaterial.map((material) => drawn(em, inputs, material)));
   return { betaCritical: summary.betaCritical, curves };
 }

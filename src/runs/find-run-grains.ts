@@ -2,12 +2,15 @@ import type { EntityManager } from '@mikro-orm/postgresql';
 import type { Actor } from '@/src/access/actor';
 import { sortedRows, type Condition } from '@/src/access/keyset';
 import { grainConditions } from '@/src/catalogues/grain-conditions';
-import { finishedRun } from './finished-run';
+import { finishedRun, type FinishedRun } from './finished-run';
 import { runGrainSorts, type GrainQuery } from './grain-query';
 import { runGrainFrom, runGrainItemOf, runGrainSelect, type RunGrainRow } from './run-grain-row';
 
 export async function findRunGrains(em: EntityManager, actor: Actor, id: string, query: GrainQuery) {
-  const run = await finishedRun(em, actor, id);
+  return grainsOfRun(em, await finishedRun(em, actor, id), query);
+}
+
+export async function grainsOfRun(em: EntityManager, run: FinishedRun, query: GrainQuery) {
   const { sort, order, limit, after, offset } = query;
   return sortedRows(
     em,

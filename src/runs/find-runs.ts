@@ -26,11 +26,11 @@ export async function listRuns(
     { ...ofOwnGroup(actor), ...(catalogueId === undefined ? {} : { catalogue: catalogueId }), ...newestFirst(after) },
     { orderBy: newestFirstOrder, limit: limit + 1, populate: ['requestedBy'], exclude: ['histograms'] },
   );
-  return pageOfRows(rows as RunRow[], limit, runItemOf);
+  return pageOfRows(rows as RunRow[], limit, ownItem);
 }
 
 export async function findRun(em: EntityManager, actor: Actor, id: string): Promise<RunItem> {
-  return runItemOf(await ownRun(em, actor, id));
+  return ownItem(await ownRun(em, actor, id));
 }
 
 export async function ownRun(em: EntityManager, actor: Actor, id: string): Promise<RunRow> {
@@ -42,7 +42,9 @@ export async function ownRun(em: EntityManager, actor: Actor, id: string): Promi
 
 export type RunRow = Loaded<Run, 'requestedBy'>;
 
-function runItemOf(row: RunRow): RunItem {
+const ownItem = (row: RunRow): RunItem => runItemOf(row, row.requestedBy.name);
+
+export function runItemOf(row: Run, requestedBy: string): RunItem {
   return {
     id: row.id,
     name: row.name,
@@ -54,7 +56,7 @@ function runItemOf(row: RunRow): RunItem {
     summary: row.summary ?? null,
     engineVersion: row.engineVersion,
     resultSha256: row.resultSha256 ?? null,
-    requestedBy: row.requestedBy.name,
+    requestedBy,
     createdAt: row.createdAt.toISOString(),
     startedAt: row.startedAt?.toISOString() ?? null,
     finishedAt: row.finishedAt?.toISOString() ?? null,

@@ -20,7 +20,11 @@ type Props = {
 export function ActionButton({ action, fields = {}, label, variant = 'secondary', question, children }: Props) {
   const [state, send, isSending] = useActionState(action, {});
   return (
-    <form action={send} onSubmit={(event) => question && !window.confirm(question) && event.preventDefault()} className="inline-grid justify-items-start gap-1">
+    <form
+      action={send}
+      onSubmit={(event) => question && !window.confirm(question) && event.preventDefault()}
+      className="inline-grid justify-items-start gap-1"
+    >
       {Object.entries(fields).map(([name, value]) => (
         <input key={name} type="hidden" name={name} value={value} />
       ))}

@@ -30,12 +30,12 @@ export function runAnswer(summary: RunSummary, star: string): RunAnswer {
 function headline({ unbound }: RunSummary, star: string): AnswerPart[] {
   const interval = { figure: percentInterval(unbound.interval95), isMinor: true };
   if (unbound.rows === 0) {
-    return [`Starlight of ${star} unbinds `, { figure: 'none' }, ' of the grains (95 % interval ', interval, ').'];
+    return [`Starlight of ${star} unbinds `, { figure: 'none' }, ' of the grains (95\u00a0% interval ', interval, ').'];
   }
   return [
     `Starlight of ${star} unbinds `,
     { figure: percentText(unbound.numberShare) },
-    ' of the grains (95 % interval ',
+    ' of the grains (95\u00a0% interval ',
     interval,
     '), ',
     { figure: percentText(unbound.areaShare) },

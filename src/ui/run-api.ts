@@ -22,6 +22,11 @@ export function apiPost<T>(path: string, body?: unknown, signal?: AbortSignal): 
   return answer<T>(fetch(path, { method: 'POST', signal, ...sent }));
 }
 
+export async function apiDelete(path: string): Promise<void> {
+  const response = await fetch(path, { method: 'DELETE' });
+  if (!response.ok) throw await problemOf(response);
+}
+
 async function answer<T>(asked: Promise<Response>): Promise<T> {
   const response = await asked;
   if (response.ok) return (await response.json()) as T;

@@ -19,7 +19,7 @@ export function RunChoiceField<Value extends string>({ legend, value, onChange, 
         {choices.map((choice) => (
           <label
             key={choice.value}
-            className="border-line bg-panel has-checked:border-chaff has-checked:bg-chaff/15 has-focus-visible:outline-chaff flex min-h-10 cursor-pointer items-center gap-2 rounded-md border px-3 py-1.5 text-sm has-focus-visible:outline-2 has-focus-visible:outline-offset-2"
+            className="border-field bg-panel has-checked:border-chaff has-checked:bg-chaff/15 has-focus-visible:outline-chaff flex min-h-10 cursor-pointer items-center gap-2 rounded-md border px-3 py-1.5 text-sm has-focus-visible:outline-2 has-focus-visible:outline-offset-2"
           >
             <input
               type="radio"

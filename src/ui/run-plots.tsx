@@ -15,19 +15,21 @@ import { WeightSwitch } from './plots/weight-switch';
 import { weights } from './plots/weights';
 import { apiGet, sayProblem } from './run-api';
 import { radiiOfInterest } from './run-radii';
+import { useRunSource } from './run-source';
 import { RunSection } from './run-section';
 
 export function RunPlots({ run, summary }: { run: RunItem; summary: RunSummary }) {
+  const { base } = useRunSource(run.id);
   const [by, setBy] = useQueryState('by', parseAsStringLiteral(weights).withDefault('number'));
   const histogram = useQuery({
-    queryKey: ['histogram', run.id, by],
-    queryFn: ({ signal }) => apiGet<RunHistogram>(`/api/v1/runs/${run.id}/histogram?by=${by}`, signal),
+    queryKey: ['histogram', base, by],
+    queryFn: ({ signal }) => apiGet<RunHistogram>(`${base}/histogram?by=${by}`, signal),
     staleTime: Infinity,
     placeholderData: keepPreviousData,
   });
   const curves = useQuery({
-    queryKey: ['curves', run.id],
-    queryFn: ({ signal }) => apiGet<RunCurves>(`/api/v1/runs/${run.id}/curves`, signal),
+    queryKey: ['curves', base],
+    queryFn: ({ signal }) => apiGet<RunCurves>(`${base}/curves`, signal),
     staleTime: Infinity,
   });
   const whole = useMemo(() => radiiOfInterest(summary, histogram.data), [summary, histogram.data]);

@@ -1,19 +1,24 @@
+'use client';
+
 import Link from 'next/link';
 import type { ReactNode } from 'react';
 import type { RunItem } from '@/src/runs/schema';
 import { percentText } from './run-figures';
 import { inputsOf } from './run-inputs-of';
 import { Moment } from './run-moment';
+import { useRunSource } from './run-source';
 import { RunSection } from './run-section';
 
 /** What another person needs to get the same numbers. */
 export function RunProvenance({ run }: { run: RunItem }) {
+  const { isShared } = useRunSource(run.id);
   const { catalogue } = inputsOf(run);
   return (
     <RunSection id="provenance" title="Provenance">
       <dl className="grid gap-x-6 gap-y-3 text-sm sm:grid-cols-[9rem_1fr]">
-        <Line term="Requested by">
-          {run.requestedBy}, <Moment iso={run.createdAt} />
+        <Line term={isShared ? 'Requested' : 'Requested by'}>
+          {!isShared && `${run.requestedBy}, `}
+          <Moment iso={run.createdAt} />
         </Line>
         {run.finishedAt && (
           <Line term="Finished">
@@ -21,13 +26,19 @@ export function RunProvenance({ run }: { run: RunItem }) {
           </Line>
         )}
         <Line term="Engine">version {run.engineVersion}</Line>
-        <Line term="Run number">
-          <Sum>{run.id}</Sum>
-        </Line>
+        {!isShared && (
+          <Line term="Run number">
+            <Sum>{run.id}</Sum>
+          </Line>
+        )}
         <Line term="Catalogue">
-          <Link href={`/catalogues/${catalogue.id}`} className="underline">
-            {catalogue.name}
-          </Link>
+          {isShared ? (
+            catalogue.name
+          ) : (
+            <Link href={`/catalogues/${catalogue.id}`} className="underline">
+              {catalogue.name}
+            </Link>
+          )}
           <span className="text-muted block">SHA-256</span>
           <Sum>{catalogue.sha256}</Sum>
         </Line>

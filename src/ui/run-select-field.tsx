@@ -27,7 +27,7 @@ export function RunSelectField({ label, value, onChange, problem, hint, choices,
         onChange={(event) => onChange(event.target.value)}
         aria-invalid={problem !== undefined}
         aria-describedby={described || undefined}
-        className="border-line bg-panel aria-invalid:border-danger h-10 w-full min-w-0 rounded-md border px-3"
+        className="border-field bg-panel aria-invalid:border-danger h-10 w-full min-w-0 rounded-md border px-3"
       >
         {empty !== undefined && <option value="">{empty}</option>}
         {choices.map((choice) => (

@@ -30,7 +30,7 @@ export function RunTextField({ label, value, onChange, unit, hint, problem, isNu
         autoComplete="off"
         aria-invalid={problem !== undefined}
         aria-describedby={described || undefined}
-        className={`border-line bg-panel aria-invalid:border-danger h-10 w-full min-w-0 rounded-md border px-3 ${isNumber ? 'font-mono tabular-nums' : ''}`}
+        className={`border-field bg-panel aria-invalid:border-danger h-10 w-full min-w-0 rounded-md border px-3 ${isNumber ? 'font-mono tabular-nums' : ''}`}
       />
       {hint && (
         <p id={`${id}-hint`} className="text-muted text-xs">

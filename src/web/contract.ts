@@ -13,6 +13,7 @@ import { grainQuery } from '@/src/runs/grain-query';
 import { curveRequest, runRequest } from '@/src/runs/request-schema';
 import { curveAnswer, histogramBy, runCurves, runGrainItem, runHistogram, runItem } from '@/src/runs/schema';
 import { catalogueGrainQuery } from '@/src/catalogues/grain-query';
+import { newShare, shareItem, shareRequest } from '@/src/sharing/schema';
 import { starItem } from '@/src/stars/schema';
 import type { Endpoint } from './endpoint';
 import { pageOf, pageQuery } from './page-schema';
@@ -149,6 +150,31 @@ export const contract = {
     summary: 'All grains of a run as CSV',
     params,
     reply: 'text/csv',
+  },
+  listShares: {
+    method: 'get',
+    path: '/runs/{id}/shares',
+    summary: 'Links under which a run is shared',
+    params,
+    reply: pageOf(shareItem),
+  },
+  makeShare: {
+    method: 'post',
+    path: '/runs/{id}/shares',
+    summary: 'Share a finished run by a link',
+    params,
+    body: shareRequest,
+    reply: newShare,
+    status: 201,
+    limit: 'run',
+  },
+  revokeShare: {
+    method: 'delete',
+    path: '/shares/{id}',
+    summary: 'Revoke a link at once',
+    params,
+    reply: z.undefined(),
+    status: 204,
   },
   listChanges: {
     method: 'get',

@@ -11,6 +11,7 @@ export const limits = {
   signInFailure: { points: 10, durationS: 900 },
   signUp: { points: 30, durationS: 3600 },
   accountMail: { points: 5, durationS: 900 },
+  passphrase: { points: 10, durationS: 900 },
   tokens: { points: 60, durationS: 3600 },
   invitation: { points: 60, durationS: 3600 },
 } as const;

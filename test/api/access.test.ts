@@ -17,7 +17,7 @@ let student: Member;
 let investigator: Member;
 let other: Member;
 let readOnly: Member;
-let ids: { catalogue: string; run: string };
+let ids: { catalogue: string; run: string; share: string };
 
 beforeAll(async () => {
   const group = await newGroup();
@@ -33,12 +33,27 @@ beforeAll(async () => {
     release: circular,
     optics: { model: 'constant', qpr: 1 },
   });
-  ids = { catalogue: catalogue.id, run: run.id };
+  const share = async () =>
+    (
+      await json<{ id: string }>(
+        call(await handlerOf(contract.makeShare), { as: own, params: { id: run.id }, json: {} }),
+        201,
+      )
+    ).id;
+  ids = { catalogue: catalogue.id, run: run.id, share: await share() };
+  newShareId = share;
 });
 
-const paramsOf = (path: string) => ({ id: path.startsWith('/runs') ? ids.run : ids.catalogue });
+/** Revoking uses a link up: whoever may is given a fresh one. */
+let newShareId: () => Promise<string>;
 
-async function ask(name: Name, as?: Member): Promise<Response> {
+function paramsOf(path: string): { id: string } {
+  if (path.startsWith('/shares')) return { id: ids.share };
+  return { id: path.startsWith('/runs') ? ids.run : ids.catalogue };
+}
+
+async function ask(name: Name, as?: Member, id?: string): Promise<Response> {
+  if (name === 'revokeShare' && as === own) ids.share = await newShareId();
   const { method, path }: Endpoint = contract[name];
   const bodies: Partial<Record<Name, object>> = {
     requestRun: {
@@ -46,10 +61,11 @@ async function ask(name: Name, as?: Member): Promise<Response> {
     },
     computeCurve: { json: { slug: 'astrosil', starSlug: 'sun', optics: { model: 'constant', qpr: 1 } } },
     uploadCatalogue: { form: uploadForm() },
+    makeShare: { json: {} },
   };
   return call(await handlerOf(contract[name]), {
     as,
-    params: paramsOf(path),
+    params: id === undefined ? paramsOf(path) : { id },
     method: method.toUpperCase(),
     ...bodies[name],
   });
@@ -59,10 +75,10 @@ const names = Object.keys(contract) as Name[];
 const ofAGroup = names.filter((name) => contract[name].path.includes('{id}'));
 
 /** What a student may not do; everything else in the contract is for every member of the group. */
-const notForStudents = new Set<Name>(['uploadCatalogue']);
+const notForStudents = new Set<Name>(['uploadCatalogue', 'makeShare', 'revokeShare']);
 /** For principal investigators (and administrators) alone. */
 const forInvestigators = new Set<Name>(['listChanges', 'downloadChanges']);
-const changes = new Set<Name>(['uploadCatalogue', 'requestRun', 'cancelRun']);
+const changes = new Set<Name>(['uploadCatalogue', 'requestRun', 'cancelRun', 'makeShare', 'revokeShare']);
 /** A run that has ended cannot be cancelled: that, not the access, is what is refused. */
 const conflicts = new Set<Name>(['cancelRun']);
 
@@ -73,14 +89,7 @@ describe('every route of the contract', () => {
 
   test.each(ofAGroup)('%s does not tell another group from nothing', async (name) => {
     const foreign = await json(ask(name, other), 404);
-    const nothing = await json(
-      call(await handlerOf(contract[name]), {
-        as: own,
-        params: { id: '00000000-0000-4000-8000-000000000000' },
-        method: contract[name].method.toUpperCase(),
-      }),
-      404,
-    );
+    const nothing = await json(ask(name, own, '00000000-0000-4000-8000-000000000000'), 404);
     expect({ ...foreign, instance: '' }).toEqual({ ...nothing, instance: '' });
   });
 

@@ -1,19 +1,23 @@
 import type { Metadata } from 'next';
+import { may } from '@/src/access/policy';
 import { listRuns } from '@/src/runs/find-runs';
 import { EmptyState } from '@/src/ui/empty-state';
 import { LinkButton } from '@/src/ui/link-button';
+import { NoGroup } from '@/src/ui/no-group';
 import { PageHeader } from '@/src/ui/page-header';
 import { RunList } from '@/src/ui/run-list';
 import { pageActor, pageEm } from '@/src/web/page';
+import { onlyOne, orNowhere } from '../nowhere';
 
 export const metadata: Metadata = { title: 'Runs' };
 
 const perPage = 50;
 
-export default async function RunsPage({ searchParams }: { searchParams: Promise<{ after?: string }> }) {
+export default async function RunsPage({ searchParams }: { searchParams: Promise<{ after?: string | string[] }> }) {
   const actor = await pageActor();
-  const { after } = await searchParams;
-  const page = await listRuns(await pageEm(), actor, { limit: perPage, after });
+  if (!may(actor, 'run.read')) return <NoGroup title="Runs" />;
+  const after = onlyOne((await searchParams).after);
+  const page = await orNowhere(listRuns(await pageEm(), actor, { limit: perPage, after }));
   return (
     <>
       <PageHeader

@@ -10,7 +10,7 @@ type Props = {
   onChange: (param: string, value: string) => void;
 };
 
-const inputClass = 'border-line bg-panel h-8 rounded border px-2';
+const inputClass = 'border-field bg-panel h-8 rounded border px-2';
 
 export function FilterControl({ id, filter, values, problem, onChange }: Props) {
   if (filter.kind === 'range')

@@ -22,7 +22,11 @@ export function cutoffsOf(
   const ends = materials.flatMap(({ name, unboundIntervalsUm }, material) =>
     [...new Set(unboundIntervalsUm.flat())]
       .filter((radiusUm): radiusUm is number => radiusUm !== null && radiusUm > 0)
-      .map((radiusUm) => ({ radiusUm, material, label: hasName ? `${shortName(name)} ${trimmed(radiusUm)}` : trimmed(radiusUm) })),
+      .map((radiusUm) => ({
+        radiusUm,
+        material,
+        label: hasName ? `${shortName(name)} ${trimmed(radiusUm)}` : trimmed(radiusUm),
+      })),
   );
   const visible = ends.filter(
     ({ radiusUm }) => Math.log10(radiusUm) >= logRange[0] && Math.log10(radiusUm) <= logRange[1],

@@ -1,15 +1,18 @@
 import type { Metadata } from 'next';
+import { may } from '@/src/access/policy';
 import { findRun } from '@/src/runs/find-runs';
 import { PageHeader } from '@/src/ui/page-header';
 import { inputsOf } from '@/src/ui/run-inputs-of';
 import { RunLive } from '@/src/ui/run-live';
+import { SharePanel } from '@/src/ui/share-panel';
 import { orNotFound, pageActor, pageEm } from '@/src/web/page';
+import { idOrNowhere } from '../../nowhere';
 
 type Props = { params: Promise<{ id: string }> };
 
 async function runOf({ params }: Props) {
   const actor = await pageActor();
-  return orNotFound(findRun(await pageEm(), actor, (await params).id));
+  return orNotFound(findRun(await pageEm(), actor, idOrNowhere((await params).id)));
 }
 
 export async function generateMetadata(props: Props): Promise<Metadata> {
@@ -23,6 +26,11 @@ export default async function RunPage(props: Props) {
     <>
       <PageHeader title={run.name} subtitle={`${catalogue.name}, ${star.name}`} />
       <RunLive initial={run} />
+      {run.status === 'done' && (
+        <div className="mt-12">
+          <SharePanel runId={run.id} manages={may(await pageActor(), 'share.manage')} />
+        </div>
+      )}
     </>
   );
 }

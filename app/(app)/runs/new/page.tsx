@@ -1,26 +1,30 @@
 import type { Metadata } from 'next';
 import type { EntityManager } from '@mikro-orm/postgresql';
 import type { Actor } from '@/src/access/actor';
+import { may } from '@/src/access/policy';
 import { listCatalogues } from '@/src/catalogues/find-catalogues';
 import { listMaterials } from '@/src/materials/find-materials';
 import { findRun } from '@/src/runs/find-runs';
 import { listStars } from '@/src/stars/find-stars';
+import { NoGroup } from '@/src/ui/no-group';
 import { PageHeader } from '@/src/ui/page-header';
 import { emptyDraft, type RunDraft } from '@/src/ui/run-draft';
 import { draftOfInputs } from '@/src/ui/run-draft-of-inputs';
 import { RunForm } from '@/src/ui/run-form';
 import { inputsOf } from '@/src/ui/run-inputs-of';
 import { orNotFound, pageActor, pageEm } from '@/src/web/page';
+import { idOrNowhere, onlyOne } from '../../nowhere';
 import { requestRunAction } from './actions';
 
 export const metadata: Metadata = { title: 'New run' };
 
 const shownCatalogues = 200;
 
-type Query = { catalogueId?: string; from?: string };
+type Query = { catalogueId?: string | string[]; from?: string | string[] };
 
 export default async function NewRunPage({ searchParams }: { searchParams: Promise<Query> }) {
   const actor = await pageActor();
+  if (!may(actor, 'run.request')) return <NoGroup title="New run" />;
   const em = await pageEm();
   const { items: catalogues } = await listCatalogues(em, actor, { limit: shownCatalogues });
   const { items: stars } = await listStars(em, actor);
@@ -44,7 +48,8 @@ export default async function NewRunPage({ searchParams }: { searchParams: Promi
 }
 
 async function draftOf(em: EntityManager, actor: Actor, { from, catalogueId }: Query, star: string): Promise<RunDraft> {
-  if (!from) return { ...emptyDraft, star, catalogueId: catalogueId ?? '' };
-  const run = await orNotFound(findRun(em, actor, from));
+  const earlier = onlyOne(from);
+  if (!earlier) return { ...emptyDraft, star, catalogueId: onlyOne(catalogueId) ?? '' };
+  const run = await orNotFound(findRun(em, actor, idOrNowhere(earlier)));
   return draftOfInputs(inputsOf(run), run.name);
 }
