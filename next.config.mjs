@@ -27,7 +27,10 @@ const config = {
     return [
       { source: '/:path*', headers: fixedHeaders },
       // After the general ones: the last value of a header counts.
-      ...['/s/:path*', '/api/s/:path*', '/reset/:path*', '/verify/:path*', '/invitation/:path*'].map((source) => ({ source, headers: secretLinkHeaders })),
+      ...['/s/:path*', '/api/s/:path*', '/reset/:path*', '/verify/:path*', '/invitation/:path*'].map((source) => ({
+        source,
+        headers: secretLinkHeaders,
+      })),
     ];
   },
   // Code that reads files beside itself or loads native parts must not be bundled.

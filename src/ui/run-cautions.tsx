@@ -4,6 +4,7 @@ import { useQuery } from '@tanstack/react-query';
 import type { RunSummary } from '@/entities/run-summary';
 import type { RunItem } from '@/src/runs/schema';
 import { Notice } from './notice';
+import { useRunSource } from './run-source';
 import { apiGet } from './run-api';
 import { runCautions } from './run-caution-sentences';
 import { inputsOf } from './run-inputs-of';
@@ -11,9 +12,10 @@ import { inputsOf } from './run-inputs-of';
 type SmallestGrain = { items: { radiusUm: number }[] };
 
 export function RunCautions({ run, summary }: { run: RunItem; summary: RunSummary }) {
-  const path = `/api/v1/runs/${run.id}/grains?sort=radiusUm&order=asc&limit=1`;
+  const { base } = useRunSource(run.id);
+  const path = `${base}/grains?sort=radiusUm&order=asc&limit=1`;
   const { data } = useQuery({
-    queryKey: ['smallest-grain', run.id],
+    queryKey: ['smallest-grain', base],
     queryFn: ({ signal }) => apiGet<SmallestGrain>(path, signal),
     staleTime: Infinity,
   });

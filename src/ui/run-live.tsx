@@ -1,6 +1,7 @@
 'use client';
 
 import { useQuery } from '@tanstack/react-query';
+import type { ReactNode } from 'react';
 import type { RunItem } from '@/src/runs/schema';
 import { apiGet, worthAskingAgain } from './run-api';
 import { RunAnswer } from './run-answer-view';
@@ -12,8 +13,8 @@ const askEveryMs = 1000;
 
 export const isUnderWay = ({ status }: Pick<RunItem, 'status'>) => status === 'queued' || status === 'running';
 
-/** A run as it is now: asks each second while it is under way, then shows the answer without a reload. */
-export function RunLive({ initial }: { initial: RunItem }) {
+/** A run as it is now: asks each second while it is under way, then shows the answer, and what belongs below it, without a reload. */
+export function RunLive({ initial, children }: { initial: RunItem; children?: ReactNode }) {
   const { data: run, isError } = useQuery({
     queryKey: ['run', initial.id],
     queryFn: ({ signal }) => apiGet<RunItem>(`/api/v1/runs/${initial.id}`, signal),
@@ -35,6 +36,7 @@ export function RunLive({ initial }: { initial: RunItem }) {
         <>
           <RunAnswer run={run} summary={run.summary} />
           <RunResults run={run} summary={run.summary} />
+          <div className="mt-10">{children}</div>
         </>
       )}
     </>

@@ -19,7 +19,11 @@ export async function benchCopy(): Promise<Line[]> {
   try {
     const names = Array.from({ length: columns }, (_, column) => `c${column} double precision`).join(', ');
     await client.query(`create temporary table bench (ordinal integer primary key, ${names})`);
-    const text = Buffer.from(Array.from({ length: rows }, (_, row) => [row, ...Array.from({ length: columns }, (_, column) => value(row, column))].join('\t')).join('\n') + '\n');
+    const text = Buffer.from(
+      Array.from({ length: rows }, (_, row) =>
+        [row, ...Array.from({ length: columns }, (_, column) => value(row, column))].join('\t'),
+      ).join('\n') + '\n',
+    );
     const pairs: [number, number][] = [];
     for (let round = 0; round < rounds; round += 1) {
       const binary = await timed(client, 'copy bench from stdin with (format binary)', binaryPieces());

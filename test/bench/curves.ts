@@ -22,7 +22,17 @@ export function benchCurves(): Line[] {
     .filter(({ id }) => chosen.includes(id))
     .map((entry) => {
       const core = opticsFromLibraryEntry(entry);
-      const { seconds, ratio } = alternating(() => void buildCurve({ core }, { kind: 'planck', teffK: 5772 }), floor, 3);
-      return { what: `curve of ${entry.name}, 1 nm to 1 cm`, value: seconds * 1000, unit: 'ms', floor: `fixed grid ${brute.radii} x ${brute.wavelengths}`, ratio: ratio / brute.part };
+      const { seconds, ratio } = alternating(
+        () => void buildCurve({ core }, { kind: 'planck', teffK: 5772 }),
+        floor,
+        3,
+      );
+      return {
+        what: `curve of ${entry.name}, 1 nm to 1 cm`,
+        value: seconds * 1000,
+        unit: 'ms',
+        floor: `fixed grid ${brute.radii} x ${brute.wavelengths}`,
+        ratio: ratio / brute.part,
+      };
     });
 }

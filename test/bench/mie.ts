@@ -19,8 +19,17 @@ export function benchMie(): Line[] {
       const repeat = (one: () => void) => () => {
         for (let call = 0; call < calls; call += 1) one();
       };
-      const { seconds, ratio } = alternating(repeat(() => mieInto(out, x, n, k)), repeat(() => textbookMie(out, x, n, k)));
-      return { what: `Mie, m = ${n} + ${k}i, x = ${x}`, value: (seconds / calls) * 1e9, unit: 'ns/call', floor: 'textbook algorithm', ratio };
+      const { seconds, ratio } = alternating(
+        repeat(() => mieInto(out, x, n, k)),
+        repeat(() => textbookMie(out, x, n, k)),
+      );
+      return {
+        what: `Mie, m = ${n} + ${k}i, x = ${x}`,
+        value: (seconds / calls) * 1e9,
+        unit: 'ns/call',
+        floor: 'textbook algorithm',
+        ratio,
+      };
     }),
   );
 }

@@ -8,7 +8,9 @@ const rounds = 3;
 
 /** Reading and checking a catalogue beside decoding its bytes and finding its line ends. */
 export async function benchReading(): Promise<Line[]> {
-  const [comment, header, ...rows] = readFileSync('fixtures/catalogues/collisional-population.csv', 'utf8').trimEnd().split('\n');
+  const [comment, header, ...rows] = readFileSync('fixtures/catalogues/collisional-population.csv', 'utf8')
+    .trimEnd()
+    .split('\n');
   const text = [comment, header, ...Array.from({ length: copies }, () => rows).flat()].join('\n');
   const bytes = Buffer.from(text);
   const knownMaterials = new Map(['astrosil', 'carbon_be'].map((slug) => [slug, slug]));
@@ -16,7 +18,11 @@ export async function benchReading(): Promise<Line[]> {
   let accepted = 0;
   for (let round = 0; round < rounds; round += 1) {
     const started = performance.now();
-    const reading = await readCatalogue(pieces(bytes), { knownMaterials, maxRows: 1e7 }, { grain: () => undefined, reject: () => undefined });
+    const reading = await readCatalogue(
+      pieces(bytes),
+      { knownMaterials, maxRows: 1e7 },
+      { grain: () => undefined, reject: () => undefined },
+    );
     const between = performance.now();
     const lines = bytes.toString('utf8').split('\n').length;
     pairs.push([between - started, performance.now() - between]);

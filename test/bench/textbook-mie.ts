@@ -38,7 +38,9 @@ export function textbookMie(out: Float64Array, x: number, n: number, k: number):
     const degeneracy = 2 * order + 1;
     extinction += degeneracy * (ar + br);
     scattering += degeneracy * (ar * ar + ai * ai + br * br + bi * bi);
-    asymmetry += (((order - 1) * (order + 1)) / order) * (lar * ar + lai * ai + lbr * br + lbi * bi) + (degeneracy / (order * (order + 1))) * (ar * br + ai * bi);
+    asymmetry +=
+      (((order - 1) * (order + 1)) / order) * (lar * ar + lai * ai + lbr * br + lbi * bi) +
+      (degeneracy / (order * (order + 1))) * (ar * br + ai * bi);
     [lar, lai, lbr, lbi] = [ar, ai, br, bi];
     [psi0, psi1, chi0, chi1] = [psi1, psi, chi1, chi];
   }

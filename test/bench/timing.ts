@@ -1,5 +1,9 @@
 /** Median seconds of `rounds` runs of each of two works, alternating, so that a noisy machine disturbs both alike. */
-export function alternating(work: () => void, floor: () => void, rounds = 7): { seconds: number; floorSeconds: number; ratio: number } {
+export function alternating(
+  work: () => void,
+  floor: () => void,
+  rounds = 7,
+): { seconds: number; floorSeconds: number; ratio: number } {
   const pairs = Array.from({ length: rounds }, () => [secondsOf(work), secondsOf(floor)] as const);
   return {
     seconds: median(pairs.map(([one]) => one)),
@@ -19,4 +23,5 @@ export function median(values: number[]): number {
   return sorted[Math.floor(sorted.length / 2)];
 }
 
-export const shortText = (value: number): string => (value >= 1000 ? Math.round(value).toLocaleString('en-US') : value.toPrecision(3));
+export const shortText = (value: number): string =>
+  value >= 1000 ? Math.round(value).toLocaleString('en-US') : value.toPrecision(3);

@@ -31,10 +31,18 @@ export function withBrowser() {
   });
   return {
     async visit({ width, colorScheme }: Look = looks[0]): Promise<Visit> {
-      const context = await browser.newContext({ viewport: { width, height: 900 }, colorScheme, acceptDownloads: true, baseURL: inject('productUrl') });
+      const context = await browser.newContext({
+        viewport: { width, height: 900 },
+        colorScheme,
+        acceptDownloads: true,
+        baseURL: inject('productUrl'),
+      });
       const page = await context.newPage();
       const complaints: string[] = [];
-      page.on('console', (message) => message.type() === 'error' && complaints.push(message.text()));
+      page.on(
+        'console',
+        (message) => message.type() === 'error' && complaints.push(`${message.text()} ${message.location().url}`),
+      );
       page.on('pageerror', (error) => complaints.push(error.message));
       return { context, page, complaints };
     },
@@ -46,7 +54,9 @@ export type Visit = { context: BrowserContext; page: Page; complaints: string[] 
 /** No violation of WCAG that axe can find, nothing wider than the screen, nothing the console complains of. */
 export async function expectSound({ page, complaints }: Visit): Promise<void> {
   const { violations } = await new AxeBuilder({ page }).analyze();
-  expect(violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ target }) => target.join(' ')).join(', ')}`)).toEqual([]);
+  expect(violations.map(({ id, nodes }) => `${id}: ${nodes.map(({ target }) => target.join(' ')).join(', ')}`)).toEqual(
+    [],
+  );
   const overflow = await page.evaluate(() => document.documentElement.scrollWidth - window.innerWidth);
   expect(overflow, 'the page is wider than the screen').toBeLessThanOrEqual(0);
   expect(complaints).toEqual([]);

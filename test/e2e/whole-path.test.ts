@@ -6,9 +6,17 @@ const { visit } = withBrowser();
 
 const csv = [
   'label,diameter_um,diameter_um_sigma,density_g_cm3,material',
-  ...Array.from({ length: 120 }, (_, index) => `g${index},${(0.1 * 1.05 ** index).toPrecision(4)},${(0.01 * 1.05 ** index).toPrecision(2)},2.6,${index % 3 ? 'astrosil' : 'carbon_be'}`),
+  ...Array.from(
+    { length: 120 },
+    (_, index) =>
+      `g${index},${(0.1 * 1.05 ** index).toPrecision(4)},${(0.01 * 1.05 ** index).toPrecision(2)},2.6,${index % 3 ? 'astrosil' : 'carbon_be'}`,
+  ),
 ].join('\n');
-const upload = (content: string, name = 'my-grains.csv') => ({ name, mimeType: 'text/csv', buffer: Buffer.from(content) });
+const upload = (content: string, name = 'my-grains.csv') => ({
+  name,
+  mimeType: 'text/csv',
+  buffer: Buffer.from(content),
+});
 
 describe('from a file to an answer', () => {
   test('a newcomer signs up, uploads, runs, reads the answer and downloads it', async () => {
@@ -17,10 +25,16 @@ describe('from a file to an answer', () => {
     await signUp(page);
     await expectSound(seen);
 
-    await page.getByRole('link', { name: /Upload a catalogue|New catalogue/ }).first().click();
+    await page
+      .getByRole('link', { name: /Upload a catalogue|New catalogue/ })
+      .first()
+      .click();
     await page.waitForURL('**/catalogues/new');
     await page.locator('input[type=file]').setInputFiles(upload(csv));
-    await page.getByText(/rows are in order|in order/).first().waitFor();
+    await page
+      .getByText(/rows are in order|in order/)
+      .first()
+      .waitFor();
     await expectSound(seen);
     await page.getByRole('button', { name: 'Upload and check' }).click();
     await page.waitForURL(/\/catalogues\/[0-9a-f-]{36}$/);
@@ -41,7 +55,9 @@ describe('from a file to an answer', () => {
 
     const waiting = page.waitForEvent('download');
     await page.getByRole('link', { name: /Download all grains/ }).click();
-    const lines = readFileSync(await (await waiting).path(), 'utf8').trimEnd().split('\r\n');
+    const lines = readFileSync(await (await waiting).path(), 'utf8')
+      .trimEnd()
+      .split('\r\n');
     expect(lines).toHaveLength(121);
 
     await page.getByLabel('Fate', { exact: true }).selectOption('unbound');
@@ -54,8 +70,13 @@ describe('from a file to an answer', () => {
     const { page } = seen;
     await signUp(page);
     await page.goto('/catalogues/new');
-    await page.locator('input[type=file]').setInputFiles(upload('radius_um,density_g_cm3,material\n-1,2,astrosil\n1,2,cheese\n2,2,ice\n'));
-    await page.getByText(/not valid/).first().waitFor();
+    await page
+      .locator('input[type=file]')
+      .setInputFiles(upload('radius_um,density_g_cm3,material\n-1,2,astrosil\n1,2,cheese\n2,2,ice\n'));
+    await page
+      .getByText(/not valid/)
+      .first()
+      .waitFor();
     await page.getByRole('button', { name: 'Upload and check' }).click();
     await page.waitForURL(/\/catalogues\/[0-9a-f-]{36}$/);
     await page.getByText('This catalogue was not accepted').waitFor();
@@ -68,8 +89,13 @@ describe('from a file to an answer', () => {
     await signUp(page);
     await page.goto('/catalogues/new');
     const picture = readFileSync(new URL('../../fixtures/catalogues/awkward/picture.bin', import.meta.url));
-    await page.locator('input[type=file]').setInputFiles({ name: 'picture.csv', mimeType: 'text/csv', buffer: picture });
-    await page.getByText(/PNG image/).first().waitFor();
+    await page
+      .locator('input[type=file]')
+      .setInputFiles({ name: 'picture.csv', mimeType: 'text/csv', buffer: picture });
+    await page
+      .getByText(/PNG image/)
+      .first()
+      .waitFor();
   });
 });
 
@@ -82,7 +108,18 @@ describe.each(looks)('at $width px, $colorScheme', (look) => {
     await page.goto('/sign-in');
     await expectSound(seen);
     await signUp(page);
-    for (const path of ['/home', '/catalogues', '/catalogues/new', '/runs', '/runs/new', '/calculator', '/stars', '/materials', '/methods', '/account']) {
+    for (const path of [
+      '/home',
+      '/catalogues',
+      '/catalogues/new',
+      '/runs',
+      '/runs/new',
+      '/calculator',
+      '/stars',
+      '/materials',
+      '/methods',
+      '/account',
+    ]) {
       await page.goto(path, { waitUntil: 'networkidle' });
       await expectSound(seen);
     }

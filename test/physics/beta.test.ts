@@ -1,6 +1,12 @@
 import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
-import { betaOf, betaOfAreaToMass, criticalSailDensityKgM2, geometricBlowoutRadiusM, plateEfficiency } from '@/src/physics/beta';
+import {
+  betaOf,
+  betaOfAreaToMass,
+  criticalSailDensityKgM2,
+  geometricBlowoutRadiusM,
+  plateEfficiency,
+} from '@/src/physics/beta';
 import { criticalBeta, type ReleasePoint } from '@/src/physics/orbit';
 import { checksNamed, expectedNumber, expectWithin, titleOf, type Check } from './optics-checks';
 
@@ -30,7 +36,13 @@ const releaseOf = ({ inputs }: Check) => ({
 
 test.each(checksNamed('blow-geom-').map((check) => [titleOf(check), check] as const))('%s', (_, check) => {
   const { L, M, rho_gcc: density } = check.inputs as Record<string, number>;
-  const radiusM = geometricBlowoutRadiusM({ qpr: 1, densityKgM3: density * 1000, betaCritical: criticalBeta(releaseOf(check)), luminositySun: L, massSun: M });
+  const radiusM = geometricBlowoutRadiusM({
+    qpr: 1,
+    densityKgM3: density * 1000,
+    betaCritical: criticalBeta(releaseOf(check)),
+    luminositySun: L,
+    massSun: M,
+  });
   expectWithin(check, radiusM * 1e6, expectedNumber(check));
 });
 
@@ -39,7 +51,13 @@ test.each(checksNamed('threshold-').map((check) => [titleOf(check), check] as co
   const expected = check.expected as Record<string, number>;
   const betaCritical = criticalBeta(releaseOf(check));
   expectWithin(check, betaCritical, expected.betaCritical);
-  const radiusM = geometricBlowoutRadiusM({ qpr: 1, densityKgM3: densityGCm3 * 1000, betaCritical, luminositySun, massSun });
+  const radiusM = geometricBlowoutRadiusM({
+    qpr: 1,
+    densityKgM3: densityGCm3 * 1000,
+    betaCritical,
+    luminositySun,
+    massSun,
+  });
   expectWithin(check, radiusM * 1e6, expected.radiusUm);
 });
 

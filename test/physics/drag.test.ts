@@ -17,14 +17,30 @@ const values: Record<string, (check: Check) => number> = {
   'wind-drag': () => wind.dragRatio,
   'wind-press': () => wind.pressureRatio,
   'tcoll-disc': () => discCollisionTimeYr({ distanceAu: 1, massSun: 1, opticalDepth: 1e-3 }),
-  'lorentz-pub': () => lorentzRatio({ potentialV: 10, fieldNT: 5 * Math.SQRT1_2, radiusM: 1e-7, densityKgM3: 3500, distanceAu: 1, massSun: 1, windSpeedKmS: 400 }),
+  'lorentz-pub': () =>
+    lorentzRatio({
+      potentialV: 10,
+      fieldNT: 5 * Math.SQRT1_2,
+      radiusM: 1e-7,
+      densityKgM3: 3500,
+      distanceAu: 1,
+      massSun: 1,
+      windSpeedKmS: 400,
+    }),
   'qm-10nm': () => chargePerMass({ potentialV: 5, radiusM: 1e-8, densityKgM3: 2500 }),
 };
 const ellipse = (check: Check) =>
-  prTimeYr({ semiMajorAxisAu: numberOf(check, 'aAu'), eccentricity: numberOf(check, 'e'), beta: numberOf(check, 'beta'), massSun: numberOf(check, 'massSun') });
+  prTimeYr({
+    semiMajorAxisAu: numberOf(check, 'aAu'),
+    eccentricity: numberOf(check, 'e'),
+    beta: numberOf(check, 'beta'),
+    massSun: numberOf(check, 'massSun'),
+  });
 const flux = (check: Check) => interplanetaryFluxPerM2Yr(numberOf(check, 'm_g'));
 
-test.each(checksNamed('pr-', 'wind-', 'tcoll-', 'lorentz-', 'qm-', 'grun-').map((check) => [titleOf(check), check] as const))('%s', (_, check) => {
+test.each(
+  checksNamed('pr-', 'wind-', 'tcoll-', 'lorentz-', 'qm-', 'grun-').map((check) => [titleOf(check), check] as const),
+)('%s', (_, check) => {
   const byFamily = check.id.startsWith('pr-ellipse') ? ellipse : flux;
   expectWithin(check, (values[check.id] ?? byFamily)(check), expectedNumber(check));
 });
@@ -42,9 +58,14 @@ function integrated(semiMajorAxisAu: number, e0: number, beta: number): number {
 }
 
 describe('drag', () => {
-  test.each([0.05, 0.3, 0.6, 0.707, 0.71, 0.9, 0.99])('time at eccentricity %s is the integral of the orbit’s decay', (eccentricity) => {
-    expect(prTimeYr({ semiMajorAxisAu: 2, eccentricity, beta: 0.2, massSun: 1 }) / integrated(2, eccentricity, 0.2)).toBeCloseTo(1, 7);
-  });
+  test.each([0.05, 0.3, 0.6, 0.707, 0.71, 0.9, 0.99])(
+    'time at eccentricity %s is the integral of the orbit’s decay',
+    (eccentricity) => {
+      expect(
+        prTimeYr({ semiMajorAxisAu: 2, eccentricity, beta: 0.2, massSun: 1 }) / integrated(2, eccentricity, 0.2),
+      ).toBeCloseTo(1, 7);
+    },
+  );
 
   test('of a circle is the limit of ellipses', () => {
     expect(prTimeYr({ semiMajorAxisAu: 1, eccentricity: 0, beta: 0.1, massSun: 1 })).toBeCloseTo(circular(1, 0.1), 9);
@@ -60,6 +81,11 @@ describe('what ends a grain’s stay', () => {
   });
 
   test('flags charge against what is left of gravity', () => {
-    expect([chargeFlag(0.05, 0), chargeFlag(0.2, 0), chargeFlag(2, 0), chargeFlag(0.05, 0.99)]).toEqual(['none', 'important', 'unreliable', 'important']);
+    expect([chargeFlag(0.05, 0), chargeFlag(0.2, 0), chargeFlag(2, 0), chargeFlag(0.05, 0.99)]).toEqual([
+      'none',
+      'important',
+      'unreliable',
+      'important',
+    ]);
   });
 });

@@ -20,17 +20,24 @@ test.each(checksNamed('brug-', 'mg-').map((check) => [titleOf(check), check] as 
   expectWithin(check, values[check.id](), expectedNumber(check));
 });
 
-test.each(checksNamed('bruggeman-', 'maxwell-garnett-').map((check) => [titleOf(check), check] as const))('%s', (_, check) => {
-  const [eps1, eps2] = [pair(check, 'eps1'), pair(check, 'eps2')];
-  const found = check.id.startsWith('bruggeman')
-    ? bruggemanTwo(eps1, eps2, numberOf(check, 'fraction1'))
-    : maxwellGarnett(eps1, eps2, numberOf(check, 'fraction2'));
-  (check.expected as unknown as number[]).forEach((expected, part) => expectWithin(check, found[part], expected));
-});
+test.each(checksNamed('bruggeman-', 'maxwell-garnett-').map((check) => [titleOf(check), check] as const))(
+  '%s',
+  (_, check) => {
+    const [eps1, eps2] = [pair(check, 'eps1'), pair(check, 'eps2')];
+    const found = check.id.startsWith('bruggeman')
+      ? bruggemanTwo(eps1, eps2, numberOf(check, 'fraction1'))
+      : maxwellGarnett(eps1, eps2, numberOf(check, 'fraction2'));
+    (check.expected as unknown as number[]).forEach((expected, part) => expectWithin(check, found[part], expected));
+  },
+);
 
 test.each(checksNamed('coat-').map((check) => [titleOf(check), check] as const))('%s', (_, check) => {
   const [core, mantle] = [pair(check, 'm_core'), pair(check, 'm_mantle')];
-  expectWithin(check, coatedEfficiencies(numberOf(check, 'x_core'), numberOf(check, 'x_total'), ...core, ...mantle).qPr, expectedNumber(check));
+  expectWithin(
+    check,
+    coatedEfficiencies(numberOf(check, 'x_core'), numberOf(check, 'x_total'), ...core, ...mantle).qPr,
+    expectedNumber(check),
+  );
 });
 
 describe('mixtures', () => {
@@ -59,7 +66,10 @@ describe('mixtures', () => {
           return [(nr * dr + ni * di) / d2, (ni * dr - nr * di) / d2];
         };
         const [ta, tb] = [term(epsA), term(epsB)];
-        const residual = Math.hypot(fraction * ta[0] + (1 - fraction) * tb[0], fraction * ta[1] + (1 - fraction) * tb[1]);
+        const residual = Math.hypot(
+          fraction * ta[0] + (1 - fraction) * tb[0],
+          fraction * ta[1] + (1 - fraction) * tb[1],
+        );
         expect(residual).toBeLessThan(1e-7);
       }),
     );
@@ -79,7 +89,10 @@ describe('mixtures', () => {
   });
 
   test('of many phases agree with those of two', () => {
-    const [re, im] = bruggeman([{ eps: [1, 0], fraction: 0.3 }, { eps: [2.8891, 0.102], fraction: 0.7 }]);
+    const [re, im] = bruggeman([
+      { eps: [1, 0], fraction: 0.3 },
+      { eps: [2.8891, 0.102], fraction: 0.7 },
+    ]);
     const two = bruggemanTwo([1, 0], [2.8891, 0.102], 0.3);
     expect(re).toBeCloseTo(two[0], 10);
     expect(im).toBeCloseTo(two[1], 10);
@@ -87,24 +100,36 @@ describe('mixtures', () => {
 });
 
 describe('a mantle', () => {
-  const light: [number, number, number][] = [[0.01, 1.7, 0.03], [1, 3, 4], [30, 1.31, 1e-8], [300, 1.7, 0.5], [1000, 2, 0.8]];
+  const light: [number, number, number][] = [
+    [0.01, 1.7, 0.03],
+    [1, 3, 4],
+    [30, 1.31, 1e-8],
+    [300, 1.7, 0.5],
+    [1000, 2, 0.8],
+  ];
 
-  test.each(light)('at x = %s, m = %s + %si: of the core’s own stuff, or around a vanishing core, is a homogeneous sphere', (x, n, k) => {
-    const { qPr, qAbs } = mieEfficiencies(x, n, k);
-    // A share of 1e-12 in k keeps the shortcut for equal materials out of the way.
-    const same = coatedEfficiencies(0.8 * x, x, n, k, n, k * (1 + 1e-12) + 1e-300);
-    expect(same.qPr / qPr).toBeCloseTo(1, 9);
-    expect(same.qAbs / qAbs).toBeCloseTo(1, 7);
-    expect(coatedEfficiencies(1e-4 * x, x, 5, 5, n, k).qPr / qPr).toBeCloseTo(1, 8);
-    expect(coatedEfficiencies(x * (1 - 1e-9), x, n, k, 1.31, 1e-8).qPr / qPr).toBeCloseTo(1, 6);
-  });
+  test.each(light)(
+    'at x = %s, m = %s + %si: of the core’s own stuff, or around a vanishing core, is a homogeneous sphere',
+    (x, n, k) => {
+      const { qPr, qAbs } = mieEfficiencies(x, n, k);
+      // A share of 1e-12 in k keeps the shortcut for equal materials out of the way.
+      const same = coatedEfficiencies(0.8 * x, x, n, k, n, k * (1 + 1e-12) + 1e-300);
+      expect(same.qPr / qPr).toBeCloseTo(1, 9);
+      expect(same.qAbs / qAbs).toBeCloseTo(1, 7);
+      expect(coatedEfficiencies(1e-4 * x, x, 5, 5, n, k).qPr / qPr).toBeCloseTo(1, 8);
+      expect(coatedEfficiencies(x * (1 - 1e-9), x, n, k, 1.31, 1e-8).qPr / qPr).toBeCloseTo(1, 6);
+    },
+  );
 
-  test.each([1e-9, 2e-8, 1e-6, 1e-4])('around a grain far smaller than the wavelength (x = %s) keeps the small-particle laws', (x) => {
-    const { qAbs, qPr } = mieEfficiencies(x, 1.7, 0.03);
-    const coated = coatedEfficiencies(0.9 * x, x, 1.7, 0.03, 1.7, 0.03 * (1 + 1e-12));
-    expect(coated.qAbs / qAbs).toBeCloseTo(1, 7);
-    expect(coated.qPr / qPr).toBeCloseTo(1, 7);
-  });
+  test.each([1e-9, 2e-8, 1e-6, 1e-4])(
+    'around a grain far smaller than the wavelength (x = %s) keeps the small-particle laws',
+    (x) => {
+      const { qAbs, qPr } = mieEfficiencies(x, 1.7, 0.03);
+      const coated = coatedEfficiencies(0.9 * x, x, 1.7, 0.03, 1.7, 0.03 * (1 + 1e-12));
+      expect(coated.qAbs / qAbs).toBeCloseTo(1, 7);
+      expect(coated.qPr / qPr).toBeCloseTo(1, 7);
+    },
+  );
 
   test('changes the density by its share of the volume', () => {
     expect(meanDensityOfCoated({ coreKgM3: 3300, mantleKgM3: 900, mantleVolumeFraction: 0.5 })).toBe(2100);

@@ -17,7 +17,11 @@ const released = (check: Check) => {
 };
 
 test.each(checksNamed('betac-').map((check) => [titleOf(check), check] as const))('%s', (_, check) => {
-  const found = criticalBeta({ eccentricity: numberOf(check, 'e'), at: 'anomaly', trueAnomalyDeg: numberOf(check, 'f_deg') });
+  const found = criticalBeta({
+    eccentricity: numberOf(check, 'e'),
+    at: 'anomaly',
+    trueAnomalyDeg: numberOf(check, 'f_deg'),
+  });
   expectWithin(check, found, expectedNumber(check));
 });
 
@@ -64,21 +68,40 @@ function fromStateVector(a: number, e: number, fDeg: number, beta: number, massS
 
 describe('the orbit after release', () => {
   const unit = (min: number, max: number) => fc.double({ min, max, noNaN: true });
-  const cases = fc.record({ a: unit(0.1, 100), e: unit(0, 0.95), f: unit(-180, 180), beta: unit(0, 1.6), massSun: unit(0.1, 20), parentBeta: fc.constantFrom(0, 0.1, 0.4) });
+  const cases = fc.record({
+    a: unit(0.1, 100),
+    e: unit(0, 0.95),
+    f: unit(-180, 180),
+    beta: unit(0, 1.6),
+    massSun: unit(0.1, 20),
+    parentBeta: fc.constantFrom(0, 0.1, 0.4),
+  });
 
   test('is that of the state vector, for 300 releases also from parents that feel the light', () => {
     let worst = 0;
     fc.assert(
       fc.property(cases, ({ a, e, f, beta, massSun, parentBeta }) => {
         fc.pre(Math.abs(beta - 1) > 1e-3);
-        const found = orbitAfterRelease({ semiMajorAxisAu: a, eccentricity: e, trueAnomalyDeg: f, beta, massSun, parentBeta });
+        const found = orbitAfterRelease({
+          semiMajorAxisAu: a,
+          eccentricity: e,
+          trueAnomalyDeg: f,
+          beta,
+          massSun,
+          parentBeta,
+        });
         const { axisAu, eccentricity, energy } = fromStateVector(a, e, f, beta, massSun, parentBeta);
         const kinetic = (massSun * GM_SUN) / (a * AU);
         fc.pre(Math.abs(energy / kinetic) > 1e-6);
         expect(found.fate).toBe(energy >= 0 ? 'unbound' : 'bound');
         worst = Math.max(worst, Math.abs((found.eccentricity ?? NaN) - eccentricity) / Math.max(1, eccentricity));
-        if (energy < 0) worst = Math.max(worst, Math.abs((found.semiMajorAxisAu ?? NaN) / axisAu - 1) * Math.abs(energy / kinetic));
-        else worst = Math.max(worst, Math.abs((found.vInfKmS ?? NaN) / (Math.sqrt(2 * energy) / 1000) - 1) * Math.abs(energy / kinetic));
+        if (energy < 0)
+          worst = Math.max(worst, Math.abs((found.semiMajorAxisAu ?? NaN) / axisAu - 1) * Math.abs(energy / kinetic));
+        else
+          worst = Math.max(
+            worst,
+            Math.abs((found.vInfKmS ?? NaN) / (Math.sqrt(2 * energy) / 1000) - 1) * Math.abs(energy / kinetic),
+          );
       }),
       { numRuns: 300, seed: 7 },
     );
@@ -90,8 +113,13 @@ describe('the orbit after release', () => {
     fc.assert(
       fc.property(cases, ({ a, e, f, massSun, parentBeta }) => {
         const betaCritical = criticalBeta({ eccentricity: e, at: 'anomaly', trueAnomalyDeg: f, parentBeta });
-        const at = (beta: number) => orbitAfterRelease({ semiMajorAxisAu: a, eccentricity: e, trueAnomalyDeg: f, beta, massSun, parentBeta }).fate;
-        expect([at(betaCritical * (1 - 1e-9)), at(betaCritical), at(betaCritical * (1 + 1e-9))]).toEqual(['bound', 'unbound', 'unbound']);
+        const at = (beta: number) =>
+          orbitAfterRelease({ semiMajorAxisAu: a, eccentricity: e, trueAnomalyDeg: f, beta, massSun, parentBeta }).fate;
+        expect([at(betaCritical * (1 - 1e-9)), at(betaCritical), at(betaCritical * (1 + 1e-9))]).toEqual([
+          'bound',
+          'unbound',
+          'unbound',
+        ]);
         expect(isUnbound(betaCritical, betaCritical)).toBe(true);
       }),
     );

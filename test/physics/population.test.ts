@@ -16,7 +16,11 @@ test.each(checksNamed('wilson-').map((check) => [titleOf(check), check] as const
 
 test.each(checksNamed('p-unbound-').map((check) => [titleOf(check), check] as const))('%s', (_, check) => {
   const { sUm, sSigmaUm, densityGCm3, densitySigma } = check.inputs as Record<string, number>;
-  expectWithin(check, black(sUm * 1e-6, sSigmaUm * 1e-6, densityGCm3 * 1000, densitySigma * 1000), expectedNumber(check));
+  expectWithin(
+    check,
+    black(sUm * 1e-6, sSigmaUm * 1e-6, densityGCm3 * 1000, densitySigma * 1000),
+    expectedNumber(check),
+  );
 });
 
 test.each(checksNamed('punb-').map((check) => [titleOf(check), check] as const))('%s', (_, check) => {
@@ -32,22 +36,35 @@ test.each(checksNamed('meb').map((check) => [titleOf(check), check] as const))('
 
 test.each(checksNamed('mle-', 'powerlaw-').map((check) => [titleOf(check), check] as const))('%s', (_, check) => {
   const sizes = (check.inputs.s ?? check.inputs.data) as number[];
-  const [min, max] = [check.inputs.smin ?? check.inputs.min, check.inputs.smax ?? check.inputs.max].map((limit) => (limit === undefined ? undefined : Number(limit)));
+  const [min, max] = [check.inputs.smin ?? check.inputs.min, check.inputs.smax ?? check.inputs.max].map((limit) =>
+    limit === undefined ? undefined : Number(limit),
+  );
   const { index, standardError } = powerLawIndex(sizes, min!, max);
   expectWithin(check, check.id === 'mle-err' ? standardError : index, expectedNumber(check));
 });
 
 test.each(checksNamed('frac-', 'doh-').map((check) => [titleOf(check), check] as const))('%s', (_, check) => {
-  if (check.id === 'doh-conv') return void expectWithin(check, sizeIndexOfMassIndex(numberOf(check, 'q_m')), expectedNumber(check));
+  if (check.id === 'doh-conv')
+    return void expectWithin(check, sizeIndexOfMassIndex(numberOf(check, 'q_m')), expectedNumber(check));
   const moment = check.id.endsWith('area') ? 2 : 0;
-  const share = powerLawShareBelow(numberOf(check, 'sc_um'), { index: 3.5, min: numberOf(check, 'smin_um'), max: numberOf(check, 'smax_um') }, moment);
+  const share = powerLawShareBelow(
+    numberOf(check, 'sc_um'),
+    { index: 3.5, min: numberOf(check, 'smin_um'), max: numberOf(check, 'smax_um') },
+    moment,
+  );
   expectWithin(check, share, expectedNumber(check));
 });
 
 describe('P(unbound)', () => {
   /** A window: unbound between about 0.06 and 0.6 um at 2.5 g/cm3. */
   const window = (radiusM: number) => 1.3 / (1 + (1.2e-7 / radiusM) ** 3);
-  const dense = (qprAt: (radiusM: number) => number, radiusM: number, sigmaM: number, density: number, sigmaDensity: number) => {
+  const dense = (
+    qprAt: (radiusM: number) => number,
+    radiusM: number,
+    sigmaM: number,
+    density: number,
+    sigmaDensity: number,
+  ) => {
     const lnSigma = Math.sqrt(Math.log1p((sigmaM / radiusM) ** 2));
     const steps = 2000;
     let sum = 0;

@@ -25,12 +25,9 @@ export default async function RunPage(props: Props) {
   return (
     <>
       <PageHeader title={run.name} subtitle={`${catalogue.name}, ${star.name}`} />
-      <RunLive initial={run} />
-      {run.status === 'done' && (
-        <div className="mt-12">
-          <SharePanel runId={run.id} manages={may(await pageActor(), 'share.manage')} />
-        </div>
-      )}
+      <RunLive initial={run}>
+        <SharePanel runId={run.id} manages={may(await pageActor(), 'share.manage')} />
+      </RunLive>
     </>
   );
 }
