@@ -11,11 +11,22 @@ export const permissions = {
   'catalogue.upload': { does: 'Upload a catalogue', roles: ['pi', 'researcher'], scope: 'write' },
   'run.read': { does: 'See the runs of the group', roles: ['pi', 'researcher', 'student'], scope: 'read' },
   'run.request': { does: 'Request a run', roles: ['pi', 'researcher', 'student'], scope: 'write' },
+  'run.impact': {
+    does: 'See what a new version of a star would change in finished runs',
+    roles: ['pi', 'admin'],
+    scope: 'read',
+  },
   'run.cancel': { does: 'Cancel a run', roles: ['pi', 'researcher', 'student'], scope: 'write' },
   'star.read': {
     does: 'See star presets',
     roles: ['pi', 'researcher', 'student', 'admin', 'groupless'],
     scope: 'read',
+  },
+  'star.manageOwn': { does: 'Draft, publish and retire star presets of the group', roles: ['pi'], scope: 'write' },
+  'star.manageShared': {
+    does: 'Draft, publish and retire star presets for everybody',
+    roles: ['admin'],
+    scope: 'write',
   },
   'material.read': {
     does: 'See materials',

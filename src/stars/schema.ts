@@ -1,9 +1,13 @@
 import { z } from 'zod';
 
 export const starNumbers = z.strictObject({
-  massSun: z.number().min(0.05).max(100).describe('Mass in nominal solar masses'),
-  luminositySun: z.number().min(1e-5).max(1e6).describe('Luminosity in nominal solar luminosities'),
-  teffK: z.number().min(2000).max(60000).describe('Effective temperature in K; sets the black-body spectrum'),
+  massSun: z.number('must be a number').min(0.05).max(100).describe('Mass in nominal solar masses'),
+  luminositySun: z.number('must be a number').min(1e-5).max(1e6).describe('Luminosity in nominal solar luminosities'),
+  teffK: z
+    .number('must be a number')
+    .min(2000)
+    .max(60000)
+    .describe('Effective temperature in K; sets the black-body spectrum'),
 });
 export type StarNumbers = z.infer<typeof starNumbers>;
 

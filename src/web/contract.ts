@@ -176,6 +176,13 @@ export const contract = {
     reply: z.undefined(),
     status: 204,
   },
+  downloadImpact: {
+    method: 'get',
+    path: '/stars/{id}/impact.csv',
+    summary: 'What a version of a star would change in finished runs',
+    params,
+    reply: 'text/csv',
+  },
   listChanges: {
     method: 'get',
     path: '/changes',

@@ -1,4 +1,6 @@
 import { beforeAll, describe, expect, test } from 'vitest';
+import { forkEm } from '@/src/db';
+import { draftNewStar } from '@/src/stars/draft-star';
 import { contract } from '@/src/web/contract';
 import type { Endpoint } from '@/src/web/endpoint';
 import { call, json } from './call';
@@ -17,7 +19,7 @@ let student: Member;
 let investigator: Member;
 let other: Member;
 let readOnly: Member;
-let ids: { catalogue: string; run: string; share: string };
+let ids: { catalogue: string; run: string; share: string; star: string };
 
 beforeAll(async () => {
   const group = await newGroup();
@@ -40,15 +42,31 @@ beforeAll(async () => {
         201,
       )
     ).id;
-  ids = { catalogue: catalogue.id, run: run.id, share: await share() };
+  ids = { catalogue: catalogue.id, run: run.id, share: await share(), star: await groupStar() };
   newShareId = share;
 });
+
+/** A star of the group alone: another group must not learn of it. */
+async function groupStar(): Promise<string> {
+  const draft = {
+    name: 'Own',
+    slug: 'own_star',
+    owner: 'group' as const,
+    massSun: 1,
+    luminositySun: 1,
+    teffK: 5772,
+    citation: 'a test',
+    note: '',
+  };
+  return (await draftNewStar(await forkEm(), investigator.actor, draft)).id;
+}
 
 /** Revoking uses a link up: whoever may is given a fresh one. */
 let newShareId: () => Promise<string>;
 
 function paramsOf(path: string): { id: string } {
   if (path.startsWith('/shares')) return { id: ids.share };
+  if (path.startsWith('/stars')) return { id: ids.star };
   return { id: path.startsWith('/runs') ? ids.run : ids.catalogue };
 }
 
@@ -77,7 +95,7 @@ const ofAGroup = names.filter((name) => contract[name].path.includes('{id}'));
 /** What a student may not do; everything else in the contract is for every member of the group. */
 const notForStudents = new Set<Name>(['uploadCatalogue', 'makeShare', 'revokeShare']);
 /** For principal investigators (and administrators) alone. */
-const forInvestigators = new Set<Name>(['listChanges', 'downloadChanges']);
+const forInvestigators = new Set<Name>(['listChanges', 'downloadChanges', 'downloadImpact']);
 const changes = new Set<Name>(['uploadCatalogue', 'requestRun', 'cancelRun', 'makeShare', 'revokeShare']);
 /** A run that has ended cannot be cancelled: that, not the access, is what is refused. */
 const conflicts = new Set<Name>(['cancelRun']);
@@ -89,7 +107,7 @@ describe('every route of the contract', () => {
 
   test.each(ofAGroup)('%s does not tell another group from nothing', async (name) => {
     const foreign = await json(ask(name, other), 404);
-    const nothing = await json(ask(name, own, '00000000-0000-4000-8000-000000000000'), 404);
+    const nothing = await json(ask(name, investigator, '00000000-0000-4000-8000-000000000000'), 404);
     expect({ ...foreign, instance: '' }).toEqual({ ...nothing, instance: '' });
   });
 

@@ -1,7 +1,10 @@
 import type { Metadata } from 'next';
+import Link from 'next/link';
+import { may } from '@/src/access/policy';
 import { listStars } from '@/src/stars/find-stars';
 import type { StarItem } from '@/src/stars/schema';
 import { DataTable, type DataColumn } from '@/src/ui/data-table';
+import { LinkButton } from '@/src/ui/link-button';
 import { PageHeader } from '@/src/ui/page-header';
 import { exactText } from '@/src/ui/run-figures';
 import { sentence } from '@/src/ui/sentence';
@@ -56,10 +59,13 @@ const columns: DataColumn<StarItem>[] = [
 export default async function StarsPage() {
   const actor = await pageActor();
   const { items } = await listStars(await pageEm(), actor);
+  const mayAdd = may(actor, 'star.manageOwn') || may(actor, 'star.manageShared');
+  const actions = mayAdd && <LinkButton href="/stars/new">New star</LinkButton>;
   return (
     <>
       <PageHeader
         title="Stars"
+        actions={actions}
         subtitle="Presets that a run can use. A run keeps the numbers it was made with, whatever becomes of the preset."
       />
       <DataTable
@@ -76,7 +82,9 @@ export default async function StarsPage() {
 function NameAndSlug({ name, slug }: { name: string; slug: string }) {
   return (
     <>
-      {name}
+      <Link href={`/stars/${slug}`} className="hover:underline">
+        {name}
+      </Link>
       <span className="text-muted block font-mono text-xs font-normal">{slug}</span>
     </>
   );
