@@ -1,12 +1,21 @@
 import type { ChangeItem } from '@/src/audit/schema';
+import { changeWords } from '@/src/ui/change-words';
 import { DataTable, type DataColumn } from '@/src/ui/data-table';
 import { Moment } from '@/src/ui/run-moment';
 
 const columns: DataColumn<ChangeItem>[] = [
   { header: 'When', show: ({ at }) => <Moment iso={at} /> },
   { header: 'Who', show: ({ person }) => person },
-  { header: 'Did', show: ({ action }) => <span className="font-mono text-xs">{action}</span> },
-  { header: 'To', show: ({ kind, target, targetId }) => `${kind} ${target || targetId}` },
+  {
+    header: 'Did',
+    show: ({ action }) => (
+      <>
+        {changeWords(action)}
+        <span className="text-muted block font-mono text-xs">{action}</span>
+      </>
+    ),
+  },
+  { header: 'What', show: ({ kind, target, targetId }) => `${kind} ${target || targetId}` },
   { header: 'Before', show: ({ before }) => <Facts of={before} /> },
   { header: 'After', show: ({ after }) => <Facts of={after} /> },
 ];

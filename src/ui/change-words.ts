@@ -1,0 +1,31 @@
+/** What each recorded action is in words; one without words shows as it is recorded. */
+const words: Record<string, string> = {
+  'account.signUp': 'signed up with',
+  'account.signIn': 'signed in',
+  'account.verify': 'confirmed the address of',
+  'account.resetPassword': 'reset the password of',
+  'account.changePassword': 'changed the password of',
+  'account.endSession': 'ended a session of',
+  'admin.first': 'made the first administrator',
+  'catalogue.upload': 'uploaded',
+  'group.create': 'started',
+  'group.rename': 'renamed',
+  'group.invite': 'invited',
+  'group.revokeInvitation': 'revoked',
+  'group.join': 'joined',
+  'group.changeRole': 'changed the role of',
+  'group.remove': 'removed',
+  'group.leave': 'left',
+  'run.request': 'requested',
+  'run.cancel': 'cancelled',
+  'share.make': 'shared',
+  'share.revoke': 'revoked a link to',
+  'star.draft': 'drafted',
+  'star.edit': 'edited the draft of',
+  'star.publish': 'published',
+  'star.retire': 'retired',
+  'token.make': 'made',
+  'token.revoke': 'revoked',
+};
+
+export const changeWords = (action: string): string => words[action] ?? action;
