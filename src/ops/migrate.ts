@@ -3,7 +3,7 @@ import PgBoss from 'pg-boss';
 import { shippedMaterials } from '@/fixtures/materials/library';
 import { starPresets } from '@/fixtures/stars';
 import { ormConfig } from '@/mikro-orm.config';
-import { env } from '@/src/env';
+import { BadEnvironment, env } from '@/src/env';
 import { publishShippedMaterials } from '@/src/materials/publish-library';
 import { queues } from '@/src/queue';
 import { publishShippedStars } from '@/src/stars/publish-presets';
@@ -33,4 +33,22 @@ export async function migrate(databaseUrl: string): Promise<void> {
 }
 
 const startedAsScript = process.argv[1]?.endsWith('migrate.ts');
-if (startedAsScript) await migrate(env().DATABASE_URL);
+if (startedAsScript) {
+  try {
+    await migrate(env().DATABASE_URL);
+  } catch (error) {
+    console.error(sentenceOf(error));
+    process.exit(1);
+  }
+}
+
+/** For the person at the keyboard: what is wrong, without a stack where it is not ours to mend. */
+function sentenceOf(error: unknown): unknown {
+  if (error instanceof BadEnvironment) return error.message;
+  const reason = error instanceof Error && 'code' in error ? String(error.code) : '';
+  const { host } = new URL(env().DATABASE_URL);
+  if (/^(ECONNREFUSED|ENOTFOUND|ETIMEDOUT|EHOSTUNREACH)$/.test(reason))
+    return `No PostgreSQL answers at ${host} (${reason}).`;
+  if (/^(28P01|28000|3D000|42501)$/.test(reason)) return `PostgreSQL at ${host} refused: ${(error as Error).message}.`;
+  return error;
+}

@@ -1,4 +1,4 @@
-import { closeSync, openSync } from 'node:fs';
+import { closeSync, openSync, readFileSync } from 'node:fs';
 import { constants } from 'node:os';
 import { Failure } from './failure.mjs';
 import { spawnNode } from './node-child.mjs';
@@ -17,9 +17,22 @@ export async function nodeExitCode(args, { log, ...options } = {}) {
   }
 }
 
+const mostWords = 6;
+
+/** What a program said last, without the stack of calls below it. */
+function lastWords(log) {
+  const lines = readFileSync(log, 'utf8').trimEnd().split('\n');
+  return lines
+    .filter((line) => !/^\s+at |^Node\.js v/.test(line))
+    .slice(-mostWords)
+    .join('\n');
+}
+
 export async function runNodeOrFail(sentence, args, options = {}) {
   const code = await nodeExitCode(args, options);
-  if (code !== 0) throw new Failure(`${sentence} (it ended with ${code}).`, options.log);
+  if (code === 0) return;
+  const said = options.log === undefined ? '' : lastWords(options.log);
+  throw new Failure([`${sentence} (it ended with ${code}).`, said].filter(Boolean).join('\n'), options.log);
 }
 
 /** A TypeScript program of the product, run outside Next. */
