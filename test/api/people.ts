@@ -4,11 +4,15 @@ import type { TokenScope } from '@/entities/personal-token';
 import type { Actor } from '@/src/access/actor';
 import { forkEm } from '@/src/db';
 import { actorOfEmail } from '@/src/people/actor-of-email';
+import { hashPassword } from '@/src/people/passwords';
 import { makeToken } from '@/src/people/tokens';
 
 export type Member = { actor: Actor; token: string };
 
 let made = 0;
+
+/** One for all: hashing takes time. */
+const hash = hashPassword('the password of the test');
 
 export async function newGroup(name = `Group ${++made}`): Promise<string> {
   const em = await forkEm();
@@ -17,7 +21,7 @@ export async function newGroup(name = `Group ${++made}`): Promise<string> {
   return group.id;
 }
 
-/** A person of a group with a token; the password is of no use to anyone. */
+/** A person of a group with a token. */
 export async function newMember(
   groupId: string,
   role: GroupRole,
@@ -25,7 +29,7 @@ export async function newMember(
 ): Promise<Member> {
   const em = await forkEm();
   const email = `person${++made}@example.org`;
-  const person = em.create(Person, { name: `Person ${made}`, email, passwordHash: 'none' });
+  const person = em.create(Person, { name: `Person ${made}`, email, passwordHash: await hash });
   em.create(Membership, { person, group: groupId, role });
   await em.flush();
   const actor = await actorOfEmail(em, email);
