@@ -1,6 +1,7 @@
 import type { EntityManager } from '@mikro-orm/postgresql';
 import { Lucia, TimeSpan, generateIdFromEntropySize } from 'lucia';
 import { createHash } from 'node:crypto';
+import { Person } from '@/entities';
 import { sessionAdapter, type SessionAttributes, type UserAttributes } from './session-adapter';
 
 declare module 'lucia' {
@@ -13,6 +14,8 @@ declare module 'lucia' {
 
 export const sessionCookieName = '__Host-session';
 export const longestSession = new TimeSpan(30, 'd');
+/** Administrators sign in anew each day. */
+const longestAdminSession = new TimeSpan(12, 'h');
 export const idleLimit = new TimeSpan(7, 'd');
 
 const luciaOf = (em: EntityManager) =>
@@ -33,7 +36,9 @@ export async function startSession(
   userAgent: string,
 ): Promise<string> {
   const secret = generateIdFromEntropySize(25);
-  const endsAt = new Date(Date.now() + longestSession.milliseconds());
+  const { platformRole } = await em.findOneOrFail(Person, { id: personId });
+  const longest = platformRole === 'admin' ? longestAdminSession : longestSession;
+  const endsAt = new Date(Date.now() + longest.milliseconds());
   await luciaOf(em).createSession(personId, { groupId, userAgent, endsAt }, { sessionId: sessionIdOf(secret) });
   return secret;
 }
