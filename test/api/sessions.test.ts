@@ -88,6 +88,20 @@ describe('a session', () => {
     }
   });
 
+  test('ASVS 7.3.2: lasts 30 days at most, an administrator’s half a day', async () => {
+    const { personId, groupId } = await newPerson();
+    const hoursOfNewest = async () => {
+      await startSession(await forkEm(), personId, groupId, '');
+      const [{ createdAt, endsAt }] = await (
+        await forkEm()
+      ).find(Session, { person: personId }, { orderBy: { createdAt: 'desc' }, limit: 1 });
+      return Math.round((endsAt.getTime() - createdAt.getTime()) / 3_600_000);
+    };
+    expect(await hoursOfNewest()).toBe(720);
+    await (await forkEm()).nativeUpdate(Person, { id: personId }, { platformRole: 'admin' });
+    expect(await hoursOfNewest()).toBe(12);
+  });
+
   test('of a person who left the group or was disabled opens nothing of it', async () => {
     const { personId, groupId } = await newPerson();
     const secret = await startSession(await forkEm(), personId, groupId, '');
