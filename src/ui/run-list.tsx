@@ -40,7 +40,7 @@ export function RunList({ initial, after, catalogueId, limit = 50 }: Props) {
                 <th
                   key={column}
                   scope="col"
-                  className={`py-1.5 pr-4 font-medium ${index === 4 ? 'text-right' : 'text-left'}`}
+                  className={`py-1.5 font-medium ${index === 4 ? 'pr-8 text-right' : 'pr-4 text-left'}`}
                 >
                   {column}
                 </th>

@@ -22,7 +22,7 @@ export function RunRow({ run }: { run: RunItem }) {
           <span className="text-muted ml-2 tabular-nums">{Math.round(run.progress * 100)} %</span>
         )}
       </td>
-      <td className="py-2.5 pr-4 text-right font-mono tabular-nums">
+      <td className="py-2.5 pr-8 text-right font-mono tabular-nums">
         {run.summary ? percentText(run.summary.unbound.numberShare) : '—'}
       </td>
       <td className="py-2.5 pr-4">

@@ -30,7 +30,7 @@ export function NameAndDefaults({ draft, problems, wasTried, materials, onChange
         value={draft.densityGCm3}
         onChange={(densityGCm3) => onChange({ densityGCm3 })}
         problem={problems.density}
-        hint="Left empty, grains of a file without a density column take their material’s own."
+        hint="For a file without a density column: a density is never guessed."
       />
       <RunSelectField
         label="Material of rows without one"
