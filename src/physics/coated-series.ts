@@ -165,35 +165,30 @@ export function coatedSeries(
 /** D_n of zeta into a table, interleaved, by the stable upward product of psi and zeta; `psi` holds D_n of psi. */
 function zetaDerivatives(into: Float64Array, zr: number, zi: number, psi: Float64Array, terms: number): void {
   const decay = Math.exp(-2 * zi);
-  const cosine = Math.cos(2 * zr) * decay;
-  const sine = Math.sin(2 * zr) * decay;
-  let productR = 0.5 * (1 - cosine);
-  let productI = -0.5 * sine;
+  // psi zeta of order 0 is (1 - exp(2 i z))/2, here without cancellation for small z.
+  let productR = Math.sin(zr) ** 2 * decay - 0.5 * Math.expm1(-2 * zi);
+  let productI = -0.5 * Math.sin(2 * zr) * decay;
   let derivativeR = 0;
   let derivativeI = 1;
-  // D_0 of psi is cot z = i (q + 1)/(q - 1), q = exp(2 i z).
-  const per = 1 / ((cosine - 1) ** 2 + sine * sine);
-  const quotientR = ((cosine + 1) * (cosine - 1) + sine * sine) * per;
-  const quotientI = (sine * (cosine - 1) - (cosine + 1) * sine) * per;
-  let psiR = -quotientI;
-  let psiI = quotientR;
   const scale = 1 / (zr * zr + zi * zi);
   into[0] = derivativeR;
   into[1] = derivativeI;
   for (let order = 1; order <= terms; order++) {
     const ratioR = order * zr * scale;
     const ratioI = -order * zi * scale;
-    const ar = ratioR - psiR;
-    const ai = ratioI - psiI;
+    const psiR = psi[2 * order];
+    const psiI = psi[2 * order + 1];
+    // psi_n/psi_(n-1) as 1/(D_n + n/z): n/z - D_(n-1) would cancel for small z.
+    const ar = psiR + ratioR;
+    const ai = psiI + ratioI;
     const br = ratioR - derivativeR;
     const bi = ratioI - derivativeI;
-    const cr = ar * br - ai * bi;
-    const ci = ar * bi + ai * br;
+    const perA = 1 / (ar * ar + ai * ai);
+    const cr = (br * ar + bi * ai) * perA;
+    const ci = (bi * ar - br * ai) * perA;
     const wasR = productR;
     productR = wasR * cr - productI * ci;
     productI = wasR * ci + productI * cr;
-    psiR = psi[2 * order];
-    psiI = psi[2 * order + 1];
     const perProduct = 1 / (productR * productR + productI * productI);
     derivativeR = psiR + productI * perProduct;
     derivativeI = psiI + productR * perProduct;
@@ -205,8 +200,8 @@ function zetaDerivatives(into: Float64Array, zr: number, zi: number, psi: Float6
 /** Ratio of psi/zeta at the mantle's two faces, order 0. */
 function firstRatio(z1r: number, z1i: number, z2r: number, z2i: number): [number, number] {
   const thinner = Math.exp(-2 * (z2i - z1i));
-  const [ar, ai] = [Math.cos(2 * z1r) - Math.exp(-2 * z1i), -Math.sin(2 * z1r)];
-  const [br, bi] = [Math.cos(2 * z2r) - Math.exp(-2 * z2i), -Math.sin(2 * z2r)];
+  const [ar, ai] = [-2 * Math.sin(z1r) ** 2 - Math.expm1(-2 * z1i), -Math.sin(2 * z1r)];
+  const [br, bi] = [-2 * Math.sin(z2r) ** 2 - Math.expm1(-2 * z2i), -Math.sin(2 * z2r)];
   const per = thinner / (br * br + bi * bi);
   return [(ar * br + ai * bi) * per, (ai * br - ar * bi) * per];
 }

@@ -39,30 +39,11 @@ export function bruggemanTwo(epsA: Complex, epsB: Complex, fractionA: number): [
   const [lossyPlus, lossyMinus] = bruggemanRoots(lossy(epsA), lossy(epsB), fractionA);
   const isPlus =
     Math.sign(lossyPlus[1]) === Math.sign(lossyMinus[1]) ? lossyPlus[0] >= lossyMinus[0] : lossyPlus[1] > 0;
-  const [re, im] = isPlus ? plus : minus;
+  const passive = isPlus ? lossyPlus : lossyMinus;
+  // Conjugate roots are equally large: which of them comes first says nothing, so the nearer one is taken.
+  const isFirst = modulusOf(subtract(plus, passive)) <= modulusOf(subtract(minus, passive));
+  const [re, im] = isFirst ? plus : minus;
   return [re, Math.max(0, im)];
-}
-
-/**
- * Effective permittivity of any number of mixed phases (Bruggeman), found by Newton's method along a path that turns the volume
- * average into the wanted mixture; ends on the passive root. Fractions sum to 1. Relative residual below 1e-12, else a RangeError.
- */
-export function bruggeman(phases: readonly { eps: Complex; fraction: number }[]): [number, number] {
-  let eps: Complex = phases.reduce<Complex>((sum, { eps: part, fraction }) => add(sum, scale(part, fraction)), [0, 0]);
-  for (let iteration = 0; iteration < 500; iteration++) {
-    let numerator: Complex = [0, 0];
-    let denominator: Complex = [0, 0];
-    for (const phase of phases) {
-      const weight = divide([phase.fraction, 0], add(phase.eps, scale(eps, 2)));
-      numerator = add(numerator, multiply(weight, phase.eps));
-      denominator = add(denominator, weight);
-    }
-    const next = divide(numerator, denominator);
-    const step = modulusOf(subtract(next, eps));
-    eps = next;
-    if (step <= 1e-14 * modulusOf(eps)) return [eps[0], Math.max(0, eps[1])];
-  }
-  throw new RangeError('The mixture of these phases did not converge.');
 }
 
 /**

@@ -1,6 +1,6 @@
 import type { FateBins, MaterialSummary, RunHistograms, RunSummary } from '@/entities/run-summary';
 import { betaOf } from '@/src/physics/beta';
-import { isUnbound } from '@/src/physics/fate';
+import { isRepelled, isUnbound } from '@/src/physics/fate';
 import { histogramEdgesM } from '@/src/physics/histogram';
 import { effectiveRows, wilsonInterval } from '@/src/physics/wilson';
 import { micrometres } from '@/src/catalogues/shown-units';
@@ -65,7 +65,7 @@ export class RunTally {
       }
       this.rows += 1;
       if (unbound) this.unboundRows += 1;
-      if (results.beta[row] >= 1) this.repelled += count;
+      if (isRepelled(results.beta[row])) this.repelled += count;
       this.expected += count * results.pUnbound[row];
       this.squaredCounts += count * count;
       this.addToMaterial(chunk.material[row], count, unbound);

@@ -2,7 +2,7 @@ import fc from 'fast-check';
 import { describe, expect, test } from 'vitest';
 import { coatedEfficiencies, coreRadiusShare, meanDensityOfCoated } from '@/src/physics/mantle';
 import { mieEfficiencies } from '@/src/physics/mie';
-import { bruggeman, bruggemanTwo, epsToIndex, indexToEps, maxwellGarnett, porousIndex } from '@/src/physics/mixtures';
+import { bruggemanTwo, epsToIndex, indexToEps, maxwellGarnett, porousIndex } from '@/src/physics/mixtures';
 import { checksNamed, expectedNumber, expectWithin, numberOf, titleOf, type Check } from './optics-checks';
 
 const pair = (check: Check, name: string): [number, number] => {
@@ -53,6 +53,16 @@ describe('mixtures', () => {
     expect(im).toBeCloseTo(0.852, 4);
   });
 
+  test.each([0, 1e-13, 1e-10])(
+    'keep the loss that a metal without loss of its own (share %s) gains by mixing',
+    (loss) => {
+      // By hand: b = (3 * 0.2 - 1)(-9) + (3 * 0.8 - 1) = 5, b^2 + 8 (-9) = -47, eps = (5 + i sqrt 47)/4.
+      const [re, im] = bruggemanTwo([-9, 9 * loss], [1, 0], 0.2);
+      expect(re).toBeCloseTo(1.25, 8);
+      expect(im).toBeCloseTo(Math.sqrt(47) / 4, 8);
+    },
+  );
+
   test('solve their own equation and never amplify light', () => {
     fc.assert(
       fc.property(index, index, share, (a, b, fraction) => {
@@ -86,16 +96,6 @@ describe('mixtures', () => {
         }
       }),
     );
-  });
-
-  test('of many phases agree with those of two', () => {
-    const [re, im] = bruggeman([
-      { eps: [1, 0], fraction: 0.3 },
-      { eps: [2.8891, 0.102], fraction: 0.7 },
-    ]);
-    const two = bruggemanTwo([1, 0], [2.8891, 0.102], 0.3);
-    expect(re).toBeCloseTo(two[0], 10);
-    expect(im).toBeCloseTo(two[1], 10);
   });
 });
 
@@ -131,8 +131,32 @@ describe('a mantle', () => {
     },
   );
 
+  test.each([
+    [1e-4, 0.5, [2, 0.8], [1.7, 0.03]],
+    [1e-5, 0.9, [0.8, 0.01], [1.7, 0.03]],
+    [1e-5, 0.001, [1, 0], [0.8, 0.01]],
+    [1e-7, 0.5, [2, 0.8], [1.7, 0.03]],
+  ] as [number, number, [number, number], [number, number]][])(
+    'around a core in a slowly varying field (x = %s, radii %s, %s in %s) absorbs as electrostatics says [Bohren & Huffman 5.36]',
+    (x, share, core, mantle) => {
+      const { qAbs } = coatedEfficiencies(share * x, x, ...core, ...mantle);
+      expect(qAbs / (4 * x * electrostaticLoss(share ** 3, indexToEps(core), indexToEps(mantle)))).toBeCloseTo(1, 6);
+    },
+  );
+
   test('changes the density by its share of the volume', () => {
     expect(meanDensityOfCoated({ coreKgM3: 3300, mantleKgM3: 900, mantleVolumeFraction: 0.5 })).toBe(2100);
     expect(coreRadiusShare(7 / 8)).toBeCloseTo(0.5, 15);
   });
 });
+
+/** Im of the polarisability of a coated sphere over 3 volumes (Bohren & Huffman 1983, eq. 5.36). */
+function electrostaticLoss(fraction: number, [a, b]: [number, number], [c, d]: [number, number]): number {
+  const times = (p: number[], q: number[]) => [p[0] * q[0] - p[1] * q[1], p[0] * q[1] + p[1] * q[0]];
+  const plus = (p: number[], q: number[], factor = 1) => [p[0] + factor * q[0], p[1] + factor * q[1]];
+  const inner = plus([a, b], [c, d], 2);
+  const contrast = plus([a, b], [c, d], -1);
+  const top = plus(times([c - 1, d], inner), times(contrast, [1 + 2 * c, 2 * d]), fraction);
+  const bottom = plus(times([c + 2, d], inner), times([2 * c - 2, 2 * d], contrast), fraction);
+  return (top[1] * bottom[0] - top[0] * bottom[1]) / (bottom[0] ** 2 + bottom[1] ** 2);
+}

@@ -1,6 +1,8 @@
 import { describe, expect, test } from 'vitest';
-import { buildCurve } from '@/src/physics/curve';
-import { constantOptics } from '@/src/physics/materials';
+import { AU, C2, L_SUN, SIGMA_SB } from '@/src/physics/constants';
+import { buildCurve, qabsAt } from '@/src/physics/curve';
+import { constantOptics, refractiveIndex, type Optics } from '@/src/physics/materials';
+import { mieEfficiencies } from '@/src/physics/mie';
 import { blackBodyTemperatureK, buildEmission, temperatureCurve } from '@/src/physics/temperature';
 import { checksNamed, expectedNumber, expectWithin, libraryOptics, titleOf } from './optics-checks';
 
@@ -38,4 +40,36 @@ describe('temperature', () => {
   test('has no value beyond the table', () => {
     expect(temperatureCurve(curve, emission, 1e6, 1e-4)(1e-6)).toBeNaN();
   });
+});
+
+/** Planck mean of Q_abs by a direct sum, ten times denser than the engine's table. */
+function denseMean(core: Optics, radiusM: number, temperatureK: number): number {
+  let sum = 0;
+  let weights = 0;
+  for (let lnU = Math.log(1e-3); lnU < Math.log(60); lnU += 0.001) {
+    const u = Math.exp(lnU);
+    const wavelengthM = C2 / (u * temperatureK);
+    const weight = u ** 4 / Math.expm1(u);
+    for (const { weight: share, model } of core.components) {
+      const q = mieEfficiencies((2 * Math.PI * radiusM) / wavelengthM, ...refractiveIndex(model, wavelengthM)).qAbs;
+      sum += weight * share * q;
+    }
+    weights += weight;
+  }
+  return sum / weights;
+}
+
+test.each([
+  ['enstatite_amorph', 7.56e-8, 0.05],
+  ['sic', 9.05e-8, 0.05],
+  ['corundum', 4.3e-8, 0.05],
+  ['silica', 4.3e-8, 0.05],
+  ['troilite_p94', 1.27e-5, 40],
+])('%s of %s m at %s au keeps its balance, to 0.004 of the temperature', (id, radiusM, distanceAu) => {
+  const recipe = { core: libraryOptics(id) };
+  const curve = buildCurve(recipe, sun);
+  const temperatureK = temperatureCurve(curve, buildEmission(recipe), 1, distanceAu)(radiusM);
+  const takenIn = (qabsAt(curve, radiusM) * L_SUN) / (16 * Math.PI * (distanceAu * AU) ** 2 * SIGMA_SB);
+  const givenOff = denseMean(recipe.core, radiusM, temperatureK) * temperatureK ** 4;
+  expect(Math.abs((givenOff / takenIn) ** 0.25 - 1)).toBeLessThan(0.004);
 });
